@@ -1,0 +1,6 @@
+import { type RouteConfig, index } from "@react-router/dev/routes";
+
+// The table of contents of the product, grouped by area. Tests and the authorisation walk read this same table.
+export default [
+  index("routes/home.tsx"),
+] satisfies RouteConfig;

@@ -1,0 +1,11 @@
+import { reactRouter } from "@react-router/dev/vite";
+import tailwindcss from "@tailwindcss/vite";
+import { defineConfig } from "vite";
+
+export default defineConfig({
+  plugins: [tailwindcss(), reactRouter()],
+  resolve: { tsconfigPaths: true },
+  // Listed so that the first visit to a lazily loaded page does not reload it in development.
+  optimizeDeps: { include: ["three", "@react-three/fiber", "zod", "clipper2-ts"] },
+  server: { host: "127.0.0.1" },
+});
