@@ -2,6 +2,8 @@ import type { Config } from "@react-router/dev/config";
 
 export default {
   ssr: true,
+  // The tests build into a folder of their own, beside the one a running server reads from.
+  buildDirectory: process.env.BUILD_DIRECTORY ?? "build",
   future: {
     v8_middleware: true,
     v8_splitRouteModules: true,

@@ -31,20 +31,21 @@ export function hashSources(root, entries = sources) {
 
 /**
  * Builds into `directory` (relative to the project) unless it holds the build of these very sources.
- * The stamp is written last, so an interrupted build is made again.
+ * `log` takes the build's words, which are shown when it fails. The stamp is written last, so an interrupted build is made again.
  */
-export async function ensureBuild(root, directory, { onStart } = {}) {
+export async function ensureBuild(root, directory, log) {
   const stamp = path.join(root, directory, ".sources-stamp");
   const hash = hashSources(root);
   if (existsSync(stamp) && readFileSync(stamp, "utf8").trim() === hash) return;
   say("Building the pages …");
   rmSync(stamp, { force: true });
+  rmSync(log, { force: true });
   const status = await run(
     process.execPath,
     [reactRouterBin(root), "build"],
-    { cwd: root, env: cleanEnvironment({ NODE_ENV: "production", BUILD_DIRECTORY: directory }), onStart },
+    { cwd: root, env: cleanEnvironment({ NODE_ENV: "production", BUILD_DIRECTORY: directory }), log },
   );
-  if (status !== 0) throw new SetUpError("The build failed; its words are above.");
+  if (status !== 0) throw new SetUpError(`${readFileSync(log, "utf8")}\nThe build failed; its words are above.`);
   writeFileSync(stamp, `${hash}\n`);
 }
 

@@ -50,6 +50,9 @@ export async function ensureDatabase(server, name, { afresh = false } = {}) {
     if (found.length === 0) {
       await connection.query(`CREATE DATABASE \`${name}\` CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci`);
     }
+  }).catch((error) => {
+    if (!/^ER_(DBACCESS_DENIED|ACCESS_DENIED|SPECIFIC_ACCESS)/.test(error.code ?? "")) throw error;
+    throw new SetUpError(`The account may not make the database ${name}. Have it made, and all privileges on it given, then start again.`);
   });
 }
 

@@ -31,18 +31,28 @@ export function cleanEnvironment(extra = {}) {
   return { ...Object.fromEntries(kept), ...extra };
 }
 
+const children = new Set();
+
+/** Ends whatever `run` has started and is still at work: a signal to this process alone would leave it behind. */
+export function endChildren(signal = "SIGTERM") {
+  for (const child of children) child.kill(signal);
+}
+
 /**
  * Runs a command to its end. Resolves with the exit status (128 + n when killed by a signal).
  * `log`: a file that takes its output; without it the output goes to this terminal.
  */
-export function run(command, args, { cwd, env = cleanEnvironment(), log, onStart } = {}) {
+export function run(command, args, { cwd, env = cleanEnvironment(), log } = {}) {
   const output = log ? openSync(log, "a", 0o600) : "inherit";
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, { cwd, env, stdio: ["ignore", output, output] });
     if (log) closeSync(output);
-    onStart?.(child);
+    children.add(child);
     child.once("error", reject);
-    child.once("exit", (status, signal) => resolve(status ?? (signal === "SIGINT" ? 130 : 143)));
+    child.once("exit", (status, signal) => {
+      children.delete(child);
+      resolve(status ?? (signal === "SIGINT" ? 130 : 143));
+    });
   });
 }
 
