@@ -69,7 +69,7 @@ function serveFiles(app: Hono<Bindings>, clientDirectory: string): void {
   app.use(
     "/assets/*",
     serveStatic({ root, onFound: (_file, c) => c.header("Cache-Control", aYear) }),
-    (c) => c.text("There is no such file.\n", 404, { "Cache-Control": "no-store" }),
+    async (c) => c.text("There is no such file.\n", 404, { "Cache-Control": "no-store" }),
   );
   app.use(serveStatic({ root, onFound: (_file, c) => c.header("Cache-Control", anHour) }));
 }
@@ -100,7 +100,7 @@ function isForeign(request: Request): boolean {
 
 function refuse(c: Context, code: "foreign-origin" | "too-large"): Response {
   const { sentence, status } = problemFor(code);
-  return c.text(`${sentence}\n`, status);
+  return c.body(`${sentence}\n`, { status, headers: { "Content-Type": "text/plain; charset=utf-8" } });
 }
 
 function addressOf(c: Context<Bindings>, trustProxy: boolean): string {
