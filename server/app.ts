@@ -46,10 +46,10 @@ export function createApp({ loadBuild, mode, clientDirectory, trustProxy = false
   });
   app.use(compress());
   app.use(async (c, next) => {
-    if (isForeign(c.req.raw)) return refuse(c, "foreign-origin");
+    if (isForeign(c.req.raw)) return refuse("foreign-origin");
     await next();
   });
-  app.use(bodyLimit({ maxSize: largestBody, onError: (c) => refuse(c, "too-large") }));
+  app.use(bodyLimit({ maxSize: largestBody, onError: () => refuse("too-large") }));
 
   if (clientDirectory) serveFiles(app, clientDirectory);
 
@@ -98,9 +98,9 @@ function isForeign(request: Request): boolean {
   return origin.replace(/^https?:\/\//, "") !== host;
 }
 
-function refuse(c: Context, code: "foreign-origin" | "too-large"): Response {
+function refuse(code: "foreign-origin" | "too-large"): Response {
   const { sentence, status } = problemFor(code);
-  return c.body(`${sentence}\n`, { status, headers: { "Content-Type": "text/plain; charset=utf-8" } });
+  return new Response(`${sentence}\n`, { status, headers: { "Content-Type": "text/plain; charset=utf-8" } });
 }
 
 function addressOf(c: Context<Bindings>, trustProxy: boolean): string {
