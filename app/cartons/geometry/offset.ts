@@ -1,0 +1,23 @@
+// The only importer of clipper2-ts: outward and inward offsets, union and difference of areas.
+import { EndType, FillRule, JoinType, differenceD, inflatePathsD, unionD } from "clipper2-ts";
+import type { Path, Point } from "./outline";
+import { CHORD_FOR_AREAS } from "./tolerance";
+import { flatten } from "./path";
+
+/** Decimals that the integer engine keeps, of a millimetre. */
+const PRECISION = 4;
+
+const ringsOf = (paths: readonly Path[]): Point[][] => paths.map((p) => flatten(p, CHORD_FOR_AREAS).map(({ x, y }) => ({ x, y })));
+const pathsOf = (rings: readonly (readonly { x: number; y: number }[])[]): Path[] =>
+  rings.map((ring) => ({ closed: true, vertices: ring.map(({ x, y }) => ({ x, y, bulge: 0 })) }));
+
+/** Areas grown (distance > 0) with round corners or shrunk (distance < 0) with sharp ones, mm. */
+export function offsetAreas(paths: readonly Path[], distance: number): Path[] {
+  const join = distance > 0 ? JoinType.Round : JoinType.Miter;
+  return pathsOf(inflatePathsD(ringsOf(paths), distance, join, EndType.Polygon, 2, PRECISION, CHORD_FOR_AREAS));
+}
+
+export const uniteAreas = (paths: readonly Path[]): Path[] => pathsOf(unionD(ringsOf(paths), [], FillRule.NonZero, PRECISION));
+
+export const subtractAreas = (from: readonly Path[], cut: readonly Path[]): Path[] =>
+  pathsOf(differenceD(ringsOf(from), ringsOf(cut), FillRule.NonZero, PRECISION));
