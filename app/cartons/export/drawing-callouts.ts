@@ -1,5 +1,5 @@
 // Radii, angles and holes: written beside the place where there is room, once for panels that are alike.
-import type { Path, Point } from "../geometry/outline";
+import type { Box, Path, Point } from "../geometry/outline";
 import { arcOf, boundsOf, eachEdge } from "../geometry/path";
 import type { Callout, Dimension, Room } from "./drawing";
 import { boxAround, figureWidth, holdsBox, isFree, pointAt, spanOf, type Shape } from "./drawing-space";
@@ -32,12 +32,16 @@ export function calloutsOf(shapes: readonly Shape[], room: Room): { callouts: Ca
         callouts.push(made);
       } else missing.add(like);
     }
-    shape.holes.forEach((hole, i) => {
-      const own = holeOf(shape, hole, i, room);
+    // Holes that are alike are measured once, as "4 × 2.2 × 29.8"; where the others stand is cut from the file.
+    const alike = new Map<string, Path[]>();
+    for (const hole of shape.holes) alike.set(sizeOf(hole), [...(alike.get(sizeOf(hole)) ?? []), hole]);
+    room.taken.push(...shape.holes.map((hole) => boundsOf([hole])));
+    for (const [text, holes] of alike) {
+      const own = holeOf(shape, holes, text, room);
       if (own.callout) callouts.push(own.callout);
       dimensions.push(...own.dimensions);
-      if (!own.callout || own.dimensions.length < 2) missing.add(`${shape.panel.name}/hole ${i}`);
-    });
+      if (!own.callout || own.dimensions.length < 2 || holes.length > 1) missing.add(`${shape.panel.name}/${text}`);
+    }
   }
   return { callouts, dimensions, leftOut: missing.size };
 }
@@ -79,7 +83,7 @@ function placed(shape: Shape, { text, on, inward }: Place, room: Room, n: number
     const d = Math.abs(inward.x) * (width / 2) + Math.abs(inward.y) * (size / 2) + size * reach;
     const at = { x: on.x + inward.x * d, y: on.y + inward.y * d };
     const box = boxAround(at, width, size * 1.2);
-    if (!holdsBox(shape, box) || !isFree(box, room.taken)) continue;
+    if (!holdsBox(shape, box) || !isFree(box, room.taken) || !isFree(box, room.lines)) continue;
     room.taken.push(box);
     const end = Math.abs(inward.x) * (width / 2) + Math.abs(inward.y) * (size / 2) + size * 0.15;
     return { id: `callout:${shape.panel.name}:${n}`, panel: shape.panel.name, text, at, leader: { from, to: { x: at.x - inward.x * end, y: at.y - inward.y * end } } };
@@ -87,15 +91,22 @@ function placed(shape: Shape, { text, on, inward }: Place, room: Room, n: number
   return null;
 }
 
+const isSameBox = (a: Box, b: Box): boolean => a.minX === b.minX && a.minY === b.minY && a.maxX === b.maxX && a.maxY === b.maxY;
 const isRound = (hole: Path): boolean => hole.vertices.length > 0 && hole.vertices.every((v) => Math.abs(v.bulge) > 0.1);
 
-/** A hole's size beside it, and where its middle stands, measured from the panel's left and lower edges. */
-function holeOf(shape: Shape, hole: Path, index: number, room: Room): { callout: Callout | null; dimensions: Dimension[] } {
+function sizeOf(hole: Path): string {
   const box = boundsOf([hole]);
-  const centre = { x: (box.minX + box.maxX) / 2, y: (box.minY + box.maxY) / 2 };
   const [width, height] = [box.maxX - box.minX, box.maxY - box.minY];
-  room.taken.push(box);
-  const text = isRound(hole) && Math.abs(width - height) < 0.02 ? `Ø ${shown(width)}` : `${shown(width)} × ${shown(height)}`;
+  return isRound(hole) && Math.abs(width - height) < 0.02 ? `Ø ${shown(width)}` : `${shown(width)} × ${shown(height)}`;
+}
+
+/** The size of holes that are alike beside the first, and where its middle stands, measured from the panel's left and lower edges. */
+function holeOf(shape: Shape, holes: readonly Path[], like: string, room: Room): { callout: Callout | null; dimensions: Dimension[] } {
+  const box = boundsOf(holes.slice(0, 1));
+  const centre = { x: (box.minX + box.maxX) / 2, y: (box.minY + box.maxY) / 2 };
+  const id = `${shape.panel.name}:${like}`;
+  const text = holes.length === 1 ? like : `${holes.length} × ${like.startsWith("Ø") ? like : `(${like})`}`;
+  const others = room.taken.filter((b) => !isSameBox(b, box));
   const size = room.size * 0.85;
   const half = figureWidth(text, size) / 2;
   let callout: Callout | null = null;
@@ -104,11 +115,12 @@ function holeOf(shape: Shape, hole: Path, index: number, room: Room): { callout:
     { x: box.maxX + half + size * 0.5, y: centre.y }, { x: box.minX - half - size * 0.5, y: centre.y },
   ]) {
     const words = boxAround(at, half * 2 + size * 0.4, size * 1.2);
-    if (callout || !holdsBox(shape, words) || !isFree(words, room.taken)) continue;
+    if (callout || !holdsBox(shape, words) || !isFree(words, room.taken) || !isFree(words, room.lines)) continue;
     room.taken.push(words);
-    callout = { id: `hole:${shape.panel.name}:${index}`, panel: shape.panel.name, text, at, leader: null };
+    callout = { id: `hole:${id}`, panel: shape.panel.name, text, at, leader: null };
   }
   const dimensions: Dimension[] = [];
+  // Its own centre lines may run into the hole; nothing else may.
   for (const m of ["x", "y"] as const) {
     const at = m === "x" ? centre.y : centre.x;
     const middle = m === "x" ? centre.x : centre.y;
@@ -119,10 +131,12 @@ function holeOf(shape: Shape, hole: Path, index: number, room: Room): { callout:
     const wide = figureWidth(figure, room.size);
     const textAt = pointAt(m, (span.low + middle) / 2, at);
     const words = m === "x" ? boxAround(textAt, wide + room.size, room.size * 1.4) : boxAround(textAt, room.size * 1.4, wide + room.size);
-    if (value < wide + room.size * 1.4 || !isFree(words, room.taken)) continue;
+    const line = m === "x" ? boxAround(textAt, value, room.size * 0.5) : boxAround(textAt, room.size * 0.5, value);
+    if (value < wide + room.size * 1.4 || !isFree(words, room.taken) || !isFree(words, room.lines) || !isFree(line, others)) continue;
     room.taken.push(words);
+    room.lines.push(line);
     dimensions.push({
-      id: `hole:${shape.panel.name}:${index}:${m}`, kind: "hole", measures: m, from: pointAt(m, span.low, at), to: pointAt(m, middle, at),
+      id: `hole:${id}:${m}`, kind: "hole", measures: m, from: pointAt(m, span.low, at), to: pointAt(m, middle, at),
       away: pointAt(m, 0, 1), value, text: figure, textAt, fits: true, row: null, parameter: null, extensions: [],
     });
   }

@@ -94,7 +94,9 @@ function chain(piece: Piece, place: Place, at: number): Dimension[] {
   for (const value of spans.flatMap((s) => [s.low, s.high]).sort((a, b) => a - b)) {
     if (stops.length === 0 || value - stops[stops.length - 1]! > SAME) stops.push(value);
   }
-  const extensions = stops.map((stop) => extensionAt(piece, place, stop));
+  // A stop on a slanting edge says nothing: another line would give another figure.
+  const isSquare = (stop: number) => spans.some((s) => (s.isLowSquare && Math.abs(s.low - stop) <= SAME) || (s.isHighSquare && Math.abs(s.high - stop) <= SAME));
+  const extensions = stops.map((stop) => (isSquare(stop) ? extensionAt(piece, place, stop) : null));
   const dimensions: Dimension[] = [];
   let tier = { until: -Infinity, raised: false };
   for (let i = 0; i + 1 < stops.length; i++) {

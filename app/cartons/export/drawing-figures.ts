@@ -60,8 +60,10 @@ function figure(row: LedgerRow, shape: Shape, side: Side, room: Room): Dimension
     const textAt = pointAt(m, (low + high) / 2, at);
     const line = m === "x" ? boxAround(textAt, high - low, size * 0.5) : boxAround(textAt, size * 0.5, high - low);
     const words = m === "x" ? boxAround(textAt, width + size, size * 1.6) : boxAround(textAt, size * 1.6, width + size);
-    if (!isFree(line, room.taken) || !isFree(words, room.taken)) continue;
-    room.taken.push(line, words);
+    if (words.minX < shape.bounds.minX || words.maxX > shape.bounds.maxX || words.minY < shape.bounds.minY || words.maxY > shape.bounds.maxY) continue;
+    if (!isFree(line, room.taken) || !isFree(words, room.taken) || !isFree(words, room.lines)) continue;
+    room.taken.push(words);
+    room.lines.push(line);
     return {
       id: `ledger:${row.id}`, kind: isAsked ? "asked" : "panel", measures: m,
       from: pointAt(m, low, at), to: pointAt(m, high, at), away: pointAt(m, 0, 1), value: row.value, text, textAt, fits: true,

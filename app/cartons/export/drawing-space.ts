@@ -1,6 +1,6 @@
 // Plane questions that a drawing asks: where does a panel reach, what lies in the way, is there room for words.
 import type { Box, Path, Point } from "../geometry/outline";
-import { flatten } from "../geometry/path";
+import { flatten, reversed } from "../geometry/path";
 import type { Carton, FlatPanel } from "../types";
 import { seenBox, seenPath, seenPoint, type Side } from "./sheet-view";
 
@@ -21,7 +21,8 @@ const CHORD = 0.05;
 
 export const shapesSeen = (carton: Carton, side: Side): Shape[] =>
   carton.panels.map((panel) => {
-    const outline = seenPath(panel.outline, side);
+    // Turned over, a path runs clockwise: walked backwards it has its inside on the left again.
+    const outline = side === "inside" ? panel.outline : reversed(seenPath(panel.outline, side));
     return {
       panel, outline, ring: flatten(outline, CHORD),
       holes: panel.holes.map((h) => seenPath(h, side)), bounds: seenBox(panel.bounds, side), labelAt: seenPoint(panel.labelAt, side),
@@ -39,10 +40,23 @@ export const unite = (boxes: readonly Box[]): Box => ({
   maxX: Math.max(...boxes.map((b) => b.maxX)), maxY: Math.max(...boxes.map((b) => b.maxY)),
 });
 
+export interface Span {
+  readonly low: number;
+  readonly high: number;
+  /** The edge there stands square to the line: a figure that ends on it means something. */
+  readonly isLowSquare: boolean;
+  readonly isHighSquare: boolean;
+}
+
+/** Sine of the lean up to which an edge counts as square: a quarter of a degree. */
+const SQUARE = 0.0044;
+
 /** Where a line along `m` at the given height enters and leaves a ring; null when it misses. */
-export function spanOf(ring: readonly Point[], m: Measures, at: number): { readonly low: number; readonly high: number } | null {
+export function spanOf(ring: readonly Point[], m: Measures, at: number): Span | null {
   let low = Infinity;
   let high = -Infinity;
+  let isLowSquare = false;
+  let isHighSquare = false;
   for (let i = 0, j = ring.length - 1; i < ring.length; j = i++) {
     const p = ring[j]!;
     const q = ring[i]!;
@@ -50,10 +64,11 @@ export function spanOf(ring: readonly Point[], m: Measures, at: number): { reado
     const dq = across(q, m) - at;
     if (dp > 0 === dq > 0) continue;
     const value = along(p, m) + ((along(q, m) - along(p, m)) * dp) / (dp - dq);
-    if (value < low) low = value;
-    if (value > high) high = value;
+    const isSquare = Math.abs(along(q, m) - along(p, m)) <= SQUARE * Math.abs(across(q, m) - across(p, m));
+    if (value < low) [low, isLowSquare] = [value, isSquare];
+    if (value > high) [high, isHighSquare] = [value, isSquare];
   }
-  return low < high ? { low, high } : null;
+  return low < high ? { low, high, isLowSquare, isHighSquare } : null;
 }
 
 /** How far a ring reaches across `m` inside the strip at ± half: lowest and highest; null when it is not in the strip. */

@@ -74,8 +74,9 @@ export interface Room {
   readonly pitch: number;
   /** How far the bleed stands out of the blank, mm. */
   readonly bleed: number;
-  /** Taken up already: names, arrows, figures. */
+  /** Taken up already by names, arrows and figures; and by dimension lines, which may cross one another but no words. */
   readonly taken: Box[];
+  readonly lines: Box[];
 }
 
 /** Figures at 9 pt and chains at 9 mm: a drawing office's paper sheet. */
@@ -85,7 +86,7 @@ export function drawingOf(carton: Carton, options: DrawingOptions): Drawing {
   const { side } = options;
   const size = options.size ?? PAPER.size;
   const shapes = shapesSeen(carton, side);
-  const room: Room = { size, gap: options.gap ?? PAPER.gap, pitch: options.pitch ?? PAPER.pitch, bleed: bleedOut(carton), taken: [] };
+  const room: Room = { size, gap: options.gap ?? PAPER.gap, pitch: options.pitch ?? PAPER.pitch, bleed: bleedOut(carton), taken: [], lines: [] };
   const labels = labelsOf(shapes, room);
   const grain = grainOf(carton, shapes, room);
   const chains = chainsOf(carton, shapes, side, room);

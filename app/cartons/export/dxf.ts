@@ -110,8 +110,11 @@ function renamed(entity: readonly Group[], written: readonly Written[]): Group[]
   });
 }
 
+/** Letters that do not come apart into a plain one and an accent. */
+const LETTERS: Readonly<Record<string, string>> = { ß: "ss", ł: "l", Ł: "L", ø: "o", Ø: "O", æ: "ae", Æ: "AE", œ: "oe", Œ: "OE", đ: "d", Đ: "D", ı: "i", "–": "-", "—": "-", "×": "x" };
+
 /** One line of printable ASCII: R12 knows no other text. */
-const ascii = (text: string): string => text.normalize("NFKD").replace(/[\u0300-\u036f]/g, "").replace(/[^\x20-\x7E]/g, "?");
+const ascii = (text: string): string => text.replace(/./gu, (c) => LETTERS[c] ?? c).normalize("NFKD").replace(/[\u0300-\u036f]/g, "").replace(/[^\x20-\x7E]/g, "?");
 
 const comments = (carton: Carton, options: DxfOptions): Group[] => [
   ["999", ascii(`${options.title ?? carton.construction.name}, revision ${options.revision}`)],

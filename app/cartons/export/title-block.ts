@@ -1,6 +1,7 @@
 // What a drawing says about itself, as plain data: the sheet on paper and the page on screen print the same cells.
 import type { Carton, LayerName, Size } from "../types";
 import type { Drawing } from "./drawing";
+import { unite } from "./drawing-space";
 import { shown } from "./number";
 import { LAYER_ORDER, PROCESSING_STEPS } from "./processing-steps";
 import { layersSeen, type Side } from "./sheet-view";
@@ -46,10 +47,19 @@ export function titleBlockOf(carton: Carton, facts: SheetFacts): readonly { read
     { height: 13, cells: [cell("Carton", facts.title, 0.66, "title"), cell("Revision", facts.revision, 0.14, "bold"), cell("Date", facts.date, 0.2)] },
     { height: 9.5, cells: [cell("Client", facts.client, 0.4), cell("Construction", constructionText(carton), 0.6)] },
     { height: 9.5, cells: [cell("Inside L × W × D", sizeText(carton.inside), 0.34, "bold"), cell("Clear inside", sizeText(carton.clearInside), 0.33), cell("Outside", sizeText(carton.outside), 0.33)] },
-    { height: 9.5, cells: [cell("Board", boardText(carton), 0.66), cell("Blank", `${shown(carton.blank.width)} × ${shown(carton.blank.height)}, ${squareCentimetres.toFixed(squareCentimetres < 100 ? 1 : 0)} cm²`, 0.34, "bold")] },
+    { height: 9.5, cells: [cell("Board", boardText(carton), 0.5), cell("Blank", `${blankText(carton)}, ${squareCentimetres.toFixed(squareCentimetres < 100 ? 1 : 0)} cm²`, 0.5, "bold")] },
     { height: 9.5, cells: [cell("Tolerance of the inside, root of squares", toleranceText(carton), 0.5), cell("Seen from", facts.side === "inside" ? "inside" : "print side", 0.25, "bold"), cell("Scale", "1 : 1", 0.25, "bold")] },
     { height: 11, cells: [cell("Drawn", facts.drawnBy ?? "", 0.5), cell("Units", "millimetres", 0.18), cell("", "CARTONWRIGHT", 0.32, "wordmark")] },
   ];
+}
+
+/** Width × height; piece by piece where there are several. */
+function blankText(carton: Carton): string {
+  if (carton.fold.parts.length < 2) return `${shown(carton.blank.width)} × ${shown(carton.blank.height)}`;
+  return carton.fold.parts.map((part) => {
+    const box = unite(carton.panels.filter((p) => p.part === part.name).map((p) => p.bounds));
+    return `${part.label} ${shown(box.maxX - box.minX)} × ${shown(box.maxY - box.minY)}`;
+  }).join("; ");
 }
 
 function boardText(carton: Carton): string {
@@ -92,12 +102,9 @@ export function notesOf(carton: Carton, drawing: Drawing, missing: Iterable<stri
   ];
   if (open > 0) notes.push(`${open === 1 ? "One warning stands" : `${open} warnings stand`} open on this carton.`);
   if (drawing.leftToFile > 0) notes.push("What carries no figure is cut from the file.");
-  if (isPulled(carton)) notes.push("Creases stop short of cuts as the options of the carton say.");
+  const [outer, inner] = [Number(carton.parameters["creaseInset"] ?? 0), Number(carton.parameters["creaseInsetInner"] ?? 0)];
+  if (outer > 0 || inner > 0) notes.push(`Creases stop ${shown(outer)} mm before outer cuts and ${shown(inner)} mm before inner ones.`);
   const lost = [...missing].map((c) => `U+${c.codePointAt(0)!.toString(16).toUpperCase().padStart(4, "0")}`);
   if (lost.length > 0) notes.push(`Characters that the typeface lacks stand as ?: ${lost.join(", ")}.`);
   return notes;
-}
-
-function isPulled(carton: Carton): boolean {
-  return Number(carton.parameters["creaseInset"] ?? 0) > 0 || Number(carton.parameters["creaseInsetInner"] ?? 0) > 0;
 }

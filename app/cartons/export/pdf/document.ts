@@ -13,7 +13,7 @@ import { createInk, POINTS, type Ink } from "./ink";
 import { groupsFor, registerGroups } from "./layer-groups";
 import { pageFor, setBoxes } from "./page-boxes";
 import { fingerprint } from "./fingerprint";
-import { drawFrame, drawLegend, drawNotes, drawTitleBlock, legendHeight } from "./sheet";
+import { drawFrame, drawLegend, drawNotes, drawTitleBlock, legendHeight, notesHeight } from "./sheet";
 
 export interface PdfOptions extends SheetFacts {
   /** Lato, unpacked to TrueType; latin first, then latin-ext. */
@@ -35,7 +35,12 @@ export async function pdfOf(carton: Carton, options: PdfOptions): Promise<Uint8A
   const drawing = drawingOf(carton, { side: options.side });
   const layers = layersSeen(carton, options.side);
   const { bounds } = drawing;
-  const layout = pageFor({ width: bounds.maxX - bounds.minX, height: bounds.maxY - bounds.minY, legendHeight: legendHeight(legendOf(carton, options.side).length) });
+  // Asked for its width once, a character without a shape is known before the notes are written.
+  for (const text of typedTexts(carton, options)) faces.regular.width(oneLine(text), 1);
+  const layout = pageFor({
+    width: bounds.maxX - bounds.minX, height: bounds.maxY - bounds.minY,
+    legendHeight: legendHeight(legendOf(carton, options.side).length), notesHeight: notesHeight(carton, drawing, faces),
+  });
   const dx = (layout.stage.minX + layout.stage.maxX - bounds.minX - bounds.maxX) / 2;
   const dy = (layout.stage.minY + layout.stage.maxY - bounds.minY - bounds.maxY) / 2;
   const groups = registerGroups(document, groupsFor((name: LayerName) => layers[name].length > 0));

@@ -15,7 +15,9 @@ const SHEETS: readonly { readonly name: string; readonly width: number; readonly
 export const MARGIN = 10;
 const AIR = 5;
 export const BLOCK = { width: 176, height: 62 } as const;
-const LEGEND_WIDTH = 176;
+/** The check bar is 100 mm long. */
+const LEGEND_WIDTH = 104;
+export const NOTES_WIDTH = 88;
 
 export interface PageLayout {
   readonly name: string;
@@ -33,6 +35,7 @@ interface Needs {
   readonly width: number;
   readonly height: number;
   readonly legendHeight: number;
+  readonly notesHeight: number;
 }
 
 /** Legend, notes and title block in a band below the drawing. */
@@ -41,10 +44,10 @@ function band(name: string, width: number, height: number, needs: Needs): PageLa
   const titleBlock = { minX: frame.maxX - BLOCK.width, minY: frame.minY, maxX: frame.maxX, maxY: frame.minY + BLOCK.height };
   const top = frame.minY + Math.max(BLOCK.height, needs.legendHeight + 2 * AIR);
   const legend = { minX: frame.minX + AIR, minY: frame.minY + AIR, maxX: frame.minX + AIR + LEGEND_WIDTH, maxY: top - AIR };
-  const roomy = titleBlock.minX - legend.maxX >= 80;
+  const roomy = titleBlock.minX - legend.maxX >= NOTES_WIDTH + 2 * AIR;
   const notes = roomy
     ? { minX: legend.maxX + AIR, minY: frame.minY + AIR, maxX: titleBlock.minX - AIR, maxY: top - AIR }
-    : { minX: titleBlock.minX + 4, minY: titleBlock.maxY + AIR, maxX: titleBlock.maxX - AIR, maxY: titleBlock.maxY + 28 };
+    : { minX: titleBlock.minX + 4, minY: titleBlock.maxY + AIR, maxX: titleBlock.maxX - AIR, maxY: titleBlock.maxY + AIR + needs.notesHeight };
   return { name, width, height, frame, titleBlock, legend, notes, stage: { minX: frame.minX + AIR, minY: roomy ? top + AIR : notes.maxY + AIR, maxX: frame.maxX - AIR, maxY: frame.maxY - AIR } };
 }
 
@@ -60,7 +63,7 @@ function column(name: string, width: number, height: number, needs: Needs): Page
 
 const holds = (layout: PageLayout, needs: Needs): boolean =>
   layout.stage.maxX - layout.stage.minX >= needs.width && layout.stage.maxY - layout.stage.minY >= needs.height &&
-  layout.titleBlock.minX >= layout.frame.minX && layout.notes.maxY - layout.notes.minY >= 22 &&
+  layout.titleBlock.minX >= layout.frame.minX && layout.notes.maxY - layout.notes.minY >= needs.notesHeight &&
   (layout.legend.maxX <= layout.titleBlock.minX || layout.legend.minY >= layout.titleBlock.maxY);
 
 /** The smallest lying sheet on which the drawing stands at 1 : 1; past A0 a sheet of its own. */

@@ -7,7 +7,7 @@ import { drawSample } from "./blank";
 import { oneLine, type Face, type Faces } from "./fonts";
 import type { Ink } from "./ink";
 import { LEGEND } from "./layer-groups";
-import type { PageLayout } from "./page-boxes";
+import { NOTES_WIDTH, type PageLayout } from "./page-boxes";
 
 const RULE = 0.35;
 const HAIR = 0.13;
@@ -15,11 +15,11 @@ const LABEL = 2.1;
 const BODY = 3.1;
 
 export const CHECK_BAR = "If this bar does not measure 100 mm, print again at actual size.";
-const LEGEND_ROW = 5.4;
-const CHECK_HEIGHT = 16;
+const LEGEND_ROW = 4.6;
+const CHECK_HEIGHT = 14;
 
 /** Height that the legend of this many layers takes, check bar included, mm. */
-export const legendHeight = (rows: number): number => 8 + Math.ceil(rows / 2) * LEGEND_ROW + CHECK_HEIGHT;
+export const legendHeight = (rows: number): number => 6 + rows * LEGEND_ROW + CHECK_HEIGHT;
 
 export function drawFrame(ink: Ink, layout: PageLayout, faces: Faces): void {
   const { frame, width, height } = layout;
@@ -115,22 +115,21 @@ function wordmark(ink: Ink, at: { x: number; y: number }, height: number, faces:
 
 export function drawLegend(ink: Ink, box: Box, carton: Carton, facts: SheetFacts, faces: Faces): void {
   const rows = legendOf(carton, facts.side);
-  const half = Math.ceil(rows.length / 2);
-  const columnWidth = (box.maxX - box.minX) / 2;
-  const top = box.maxY - 7;
-  const placeOf = (i: number) => ({ left: box.minX + (i < half ? 0 : columnWidth), y: top - (i % half) * LEGEND_ROW - 3 });
+  const top = box.maxY - 6;
+  const left = box.minX;
+  const placeOf = (i: number) => top - i * LEGEND_ROW - LEGEND_ROW / 2;
   ink.layer(LEGEND.key, () => {
     ink.text("Lines", { x: box.minX, y: box.maxY - 3 }, { face: faces.bold, size: BODY * 1.1 });
     rows.forEach((row, i) => {
-      const { left, y } = placeOf(i);
+      const y = placeOf(i);
       ink.text(row.label, { x: left + 20, y: y - 1.1 }, { face: faces.regular, size: BODY });
-      ink.text(row.figure, { x: left + columnWidth - 8, y: y - 1.1 }, { face: faces.regular, size: BODY, align: "right" });
+      ink.text(row.figure, { x: left + 100, y: y - 1.1 }, { face: faces.regular, size: BODY, align: "right" });
     });
-    drawCheckBar(ink, { x: box.minX, y: top - half * LEGEND_ROW - 7 }, faces, true);
+    drawCheckBar(ink, { x: box.minX, y: top - rows.length * LEGEND_ROW - 6 }, faces, true);
     // Samples stand off the bleed in process colours: in a layer's own separation they would be cut with it.
     rows.forEach((row, i) => {
-      const { left, y } = placeOf(i);
-      drawSample(ink, row.layer, { minX: left, minY: y - 1.7, maxX: left + 16, maxY: y + 1.7 });
+      const y = placeOf(i);
+      drawSample(ink, row.layer, { minX: left, minY: y - 1.5, maxX: left + 16, maxY: y + 1.5 });
     });
   });
 }
@@ -155,12 +154,19 @@ export function drawNotes(ink: Ink, box: Box, carton: Carton, drawing: Drawing, 
       ink.text(String(i + 1), { x: box.minX, y }, { face: faces.regular, size: BODY * 0.95 });
       for (const line of lines) {
         ink.text(line, { x: box.minX + 5, y }, { face: faces.regular, size: BODY * 0.95 });
-        y -= 4.1;
+        y -= NOTE_LINE;
       }
-      y -= 0.6;
+      y -= NOTE_GAP;
     });
   });
 }
+
+const NOTE_LINE = 4.1;
+const NOTE_GAP = 0.6;
+
+/** Height that the notes take in the narrowest column they get, mm. */
+export const notesHeight = (carton: Carton, drawing: Drawing, faces: Faces): number =>
+  notesOf(carton, drawing, faces.missing).reduce((sum, note) => sum + wrapped(note, faces.regular, BODY * 0.95, NOTES_WIDTH - 5).length * NOTE_LINE + NOTE_GAP, 10);
 
 function wrapped(text: string, face: Face, size: number, width: number): string[] {
   const lines: string[] = [];
