@@ -30,7 +30,7 @@ export function declare(registered: Registered, size: Size, options: Options, bo
   const { construction, asks, compiled } = registered;
   const grain = grainOf(registered, board, options["grain"] === "turned");
   const { a90, slide } = board.card;
-  const base = { L: size.L, W: size.W, D: size.D, t: board.caliper, a: Math.max(a90.alongGrain, a90.acrossGrain), micro: board.family === "micro" ? 1 : 0, cardSlide: slide, creaseSpacing: minimumCreaseSpacing(board) };
+  const base = { L: size.L, W: size.W, D: size.D, t: board.caliper, a: Math.max(a90.alongGrain, a90.acrossGrain), aLeast: Math.min(a90.alongGrain, a90.acrossGrain), micro: board.family === "micro" ? 1 : 0, cardSlide: slide, creaseSpacing: minimumCreaseSpacing(board) };
   const outOfRange = AXES.flatMap((axis) => sizeRefusal(registered, axis, size[axis]));
   if (outOfRange.length > 0) return { ok: false, refusals: outOfRange };
   const resolved = resolve(compiled, options, base);
@@ -38,11 +38,23 @@ export function declare(registered: Registered, size: Size, options: Options, bo
   const swapped: Refusal[] = !construction.mayBeWiderThanLong && size.W > size.L
     ? [{ code: "too-large", parameter: "W", given: size.W, limit: { atMost: size.L }, nearest: size.L, because: "L is the longer side of the opening; swap length and width" }]
     : [];
-  const refusals = [...swapped, ...resolved.refusals, ...passed];
+  const refusals = strictest([...swapped, ...resolved.refusals, ...passed]);
   if (refusals.length > 0) return { ok: false, refusals };
   const kit = createKit({ board, size, grain, values: resolved.values, labels: (name) => asks[name]?.label ?? name, isSet: (name) => resolved.isSet.has(name) });
   construction.declare(kit);
   return { ok: true, blank: kit.finish(), resolved };
+}
+
+/** Of several limits on one side of one parameter only the one that asks most: mending it mends the others. */
+function strictest(refusals: readonly Refusal[]): Refusal[] {
+  const kept = new Map<string, Refusal>();
+  for (const r of refusals) {
+    const key = `${r.parameter}:${r.code}`;
+    const known = kept.get(key);
+    const asksMore = known && typeof r.nearest === "number" && typeof known.nearest === "number" && (r.code === "too-small" ? r.nearest > known.nearest : r.nearest < known.nearest);
+    if (!known || asksMore) kept.set(key, r);
+  }
+  return [...kept.values()];
 }
 
 function sizeRefusal({ construction }: Registered, axis: Axis, given: number): Refusal[] {

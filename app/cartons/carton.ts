@@ -6,7 +6,7 @@ import { checkMotion, type MotionReport } from "./checks/motion";
 import { findConstruction, listConstructions, type Registered } from "./constructions/registry";
 import { foldModelOf } from "./fold/fold-model";
 import { SAME_POINT } from "./geometry/tolerance";
-import { nearestThatWorks } from "./nearest";
+import { nearestForAll } from "./nearest";
 import type { Axis, Brief, Carton, CartonResult, Refusal, Size } from "./types";
 
 /** Rounds of closing in on an inside size from another basis; each corrects by what is still missing. */
@@ -23,7 +23,11 @@ export function buildCarton(brief: Brief, board: Board): CartonResult {
   }
   const result = attempt(registered, brief, board);
   if (result.ok) return result;
-  return { ok: false, refusals: result.refusals.map((r) => nearestThatWorks(r, brief, registered, (other) => attempt(registered, other, board).ok)) };
+  const refusalsOf = (other: Brief) => {
+    const again = attempt(registered, other, board);
+    return again.ok ? [] : again.refusals;
+  };
+  return { ok: false, refusals: nearestForAll(result.refusals, brief, registered, refusalsOf) };
 }
 
 /** The same without looking for nearest values. */

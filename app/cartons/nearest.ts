@@ -27,6 +27,38 @@ function candidates(refusal: Refusal): OptionValue[] {
 /** Steps away from what was given, in per cent, both ways; the nearest first. */
 const STEPS = [2, 5, 10, 15, 20, 30, 40, 50, 75, 100, 150, 200, 300, 500, 900];
 
+/** Rounds of mending all at once; each applies every limit that still stands. */
+const MENDS = 10;
+
+/**
+ * The brief with every refused figure brought to its limit, until it is accepted; null when that does not end. `refusals`
+ * are those of `brief`; `again` gives those of a mended one.
+ */
+export function mendedTogether(brief: Brief, refusals: readonly Refusal[], again: (brief: Brief) => readonly Refusal[]): Brief | null {
+  let mended = brief;
+  let left = refusals;
+  for (let round = 0; round < MENDS && left.length > 0; round++) {
+    for (const r of left) {
+      const value = candidates(r)[0];
+      if (value === undefined) return null;
+      mended = withParameter(mended, r.parameter, value);
+    }
+    left = again(mended);
+  }
+  return left.length === 0 ? mended : null;
+}
+
+const valueIn = (brief: Brief, parameter: string): OptionValue | null => (isAxis(parameter) ? brief.size[parameter] : brief.options[parameter] ?? null);
+
+/** For several refusals at once: each alone if it can be mended alone, else the value it has when all are mended together. */
+export function nearestForAll(refusals: readonly Refusal[], brief: Brief, registered: Registered, attempt: (brief: Brief) => readonly Refusal[]): Refusal[] {
+  const accepts = (b: Brief) => attempt(b).length === 0;
+  const alone = refusals.length > 1 && refusals.some((r) => r.parameter !== refusals[0]!.parameter) ? null : refusals.map((r) => nearestThatWorks(r, brief, registered, accepts));
+  if (alone?.every((r) => r.nearest !== null)) return alone;
+  const together = mendedTogether(brief, refusals, attempt);
+  return refusals.map((r, i) => (together ? { ...r, nearest: valueIn(together, r.parameter) } : alone?.[i] ?? nearestThatWorks(r, brief, registered, accepts)));
+}
+
 export function nearestThatWorks(refusal: Refusal, brief: Brief, registered: Registered, accepts: Accepts): Refusal {
   for (const value of candidates(refusal)) if (accepts(withParameter(brief, refusal.parameter, value))) return { ...refusal, nearest: value };
   if (refusal.code === "unknown-option") return { ...refusal, nearest: null };

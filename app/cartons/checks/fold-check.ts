@@ -1,6 +1,7 @@
 // The folding proof: the blank is folded as thick board and judged. Checks never throw and change nothing.
 import type { Board } from "../boards/board";
 import type { Blank } from "../blank/blank";
+import { SAME_POINT } from "../geometry/tolerance";
 import type { Finding, FoldCheck, FoldModel, Severity } from "../types";
 import { checkCavity } from "./cavity";
 import { checkClearInside } from "./clear-inside";
@@ -25,7 +26,7 @@ export function foldCheckOf(blank: Blank, fold: FoldModel, board: Board): FoldCh
   const mates = checkMates(closed);
   const locks = checkLocks(closed);
   const collisions = checkCollisions(closed);
-  const seam: Finding[] = blank.flatResidual !== null && blank.flatResidual > SEAM_RESIDUAL
+  const seam: Finding[] = blank.flatResidual !== null && blank.flatResidual > SEAM_RESIDUAL + SAME_POINT
     ? [{ code: "flat-seam", severity: "warning", panels: ["glue flap"], at: null, measured: blank.flatResidual, required: SEAM_RESIDUAL, facts: {}, mend: null }]
     : [];
   const findings = [...cavity.findings, ...clear.findings, ...envelope.findings, ...mates.findings, ...locks.findings, ...collisions.findings, ...seam].sort(bySeverity);

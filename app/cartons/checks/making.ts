@@ -107,7 +107,7 @@ function creaseFindings(layers: Layers, spacing: number): Finding[] {
       const parallel = Math.abs(off(p) - off(q)) < SAME_POINT;
       const apart = Math.abs(off(p));
       const shared = Math.min(length, Math.max(on(p), on(q))) - Math.max(0, Math.min(on(p), on(q)));
-      if (!parallel || apart < SAME_POINT || apart >= spacing - SAME_POINT || shared <= 0) continue;
+      if (!parallel || apart < SAME_POINT || apart >= spacing - SAME_POINT || shared <= STEP) continue;
       findings.push({ code: "creases-close", severity: "warning", panels: [...c.panels, ...other.panels], at: { x: (p.x + q.x) / 2, y: (p.y + q.y) / 2 }, measured: apart, required: spacing, facts: {}, mend: null });
     }
   });

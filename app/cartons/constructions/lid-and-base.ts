@@ -18,8 +18,9 @@ export const lidAndBase: Construction = {
   meaning: "L, W and D inside the base; the lid rests on its rim",
   ask: {
     ...trayAsks,
-    lidD: { label: "Lid, depth inside", kind: "length", default: "min(D, max(if(micro, 20, 12), 0.4*D))", atLeast: "max(8*t, 12)", atMost: "D", why: "a lid of 0.3 to 0.5 of the depth is a shoe-box lid; equal to D it covers the base", source: "engineering practice, no published source", because: "a lid deeper than the base would stand on the table and not on the rim" },
+    lidD: { label: "Lid, depth inside", kind: "length", default: "min(D, max(if(micro, 20, 12), 0.4*D, glueFoot + glueTop + 2*tan(glueTaper)*glue + 6.5))", atLeast: "max(8*t, 12)", atMost: "D", why: "a lid of 0.3 to 0.5 of the depth is a shoe-box lid; equal to D it covers the base", source: "engineering practice, no published source", because: "a lid deeper than the base would stand on the table and not on the rim" },
     clearance: { label: "Lid over base, clearance in all", kind: "length", default: "if(micro, if(t < 1.3, 2, 2.5), 1 + if(60 < D, 0.4, 0) + 2*max(0, t - 0.5))", atLeast: 0.4, atMost: 8, why: "half of it on each side: below it binds, above it rattles; try a sample", source: "1 to 1.5 mm in all for cartonboard, 2 to 3 mm E flute; common practice, no source" },
+    lidLining: { label: "Room for the lid's own glue flaps, in all", kind: "length", default: "max(0, 2*t + 0.2 - clearance)", atLeast: "max(0, 2*t + 0.2 - clearance)", atMost: 8, why: "they lie inside the lid's ends and would rub on the base", source: "derived: two boards less the clearance", because: "the lid's glue flaps would stand in the base's ends" },
   },
 
   cannot: (s) => [
@@ -29,7 +30,7 @@ export const lidAndBase: Construction = {
 
   declare: (k) => {
     const inside = { L: k.asked("L"), W: k.asked("W"), D: k.asked("D") };
-    const lidL = k.plus(inside.L, k.stack(2), k.option("clearance"));
+    const lidL = k.plus(inside.L, k.stack(2), k.option("clearance"), k.option("lidLining"));
     const lidW = k.plus(inside.W, k.stack(2), k.option("clearance"));
     const lidD = k.option("lidD");
     const base = tray(k, inside, { part: "base", prefix: "", words: "Base: ", at: { c: 1, s: 0, x: 0, y: 0 }, own: true });
@@ -37,13 +38,13 @@ export const lidAndBase: Construction = {
     const lid = tray(k, { L: lidL, W: lidW, D: lidD }, { part: "lid", prefix: "lid ", words: "Lid: ", at: { c: 1, s: 0, x: 0, y: up }, own: false });
 
     const half = k.option("clearance", 0.5);
-    for (const side of ["left", "right"] as const) k.slides(k.face(base[side], "print"), k.face(lid[side], "inside"), half, 20);
+    const halfL = k.plus(half, k.option("lidLining", 0.5));
+    for (const side of ["left", "right"] as const) k.slides(k.face(base[side], "print"), k.face(lid[side], "inside"), halfL, 20);
     // Turned over, the lid's front stands at the base's back.
     k.slides(k.face(base.front, "print"), k.face(lid.back, "inside"), half, 20);
     k.slides(k.face(base.back, "print"), k.face(lid.front, "inside"), half, 20);
-    const around = k.plus(k.stack(2), half);
-    k.outsideBy("L", around, around);
-    k.outsideBy("W", around, around);
+    k.outsideBy("L", k.plus(k.stack(2), halfL), k.plus(k.stack(2), halfL));
+    k.outsideBy("W", k.plus(k.stack(2), half), k.plus(k.stack(2), half));
     k.outsideBy("D", k.stack(1), k.stack(1));
     k.row("lid inside L", "Lid, inside length", lidL, { panel: lid.base, along: "x", reason: "the base's outside and the clearance" });
     k.row("lid inside W", "Lid, inside width", lidW, { panel: lid.base, along: "y", reason: "the base's outside and the clearance" });

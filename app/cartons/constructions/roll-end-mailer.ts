@@ -6,7 +6,7 @@
 import type { LayerUse } from "../blank/kit";
 import { limit, type Construction } from "./construction";
 import { mailerAsks } from "./parts/mailer-asks";
-import { cornerFlap, earedTuck, innerWall, ear, slot, strip, tabsOf, tuckFlap, wing } from "./parts/mailer-shapes";
+import { cornerFlap, earedTuck, innerWall, ear, earEdge, slot, strip, tabsOf, tuckFlap, wing } from "./parts/mailer-shapes";
 import { rectangle, rounded } from "../blank/shapes";
 
 const ACROSS: LayerUse = { creases: "x" };
@@ -74,8 +74,9 @@ export const rollEndMailer: Construction = {
     k.attach("back", "up", "lid", box(lidL.mm, lidW.mm), { label: "Lid", role: "wall" });
     for (const end of ["left", "right"] as const) k.attach("lid", end, `wing ${end}`, wing(k, lidW.mm, end === "right"), { label: "Wing", role: "lining", origin: "foot" });
     if (ears) {
-      k.attach("lid", "up", "tuck", earedTuck(k, endL.mm), { label: "Tuck", role: "lining" });
-      for (const end of ["left", "right"] as const) k.attach("tuck", end, `ear ${end}`, ear(k, end === "left"), { label: "Ear", origin: "foot" });
+      const tuck = earedTuck(k, endL.mm);
+      k.attach("lid", "up", "tuck", tuck, { label: "Tuck", role: "lining" });
+      for (const end of ["left", "right"] as const) k.attach("tuck", end, `ear ${end}`, ear(k, end === "left"), { label: "Ear", origin: "foot", edge: earEdge(tuck, end) });
     } else k.attach("lid", "up", "tuck", tuckFlap(k), { label: "Tuck", role: "lining" });
 
     k.inside("L", k.face("inner left", "print"), k.face("inner right", "print"));
@@ -85,13 +86,14 @@ export const rollEndMailer: Construction = {
     k.outsideBy("L", around, around);
     k.outsideBy("W", k.stack(1), k.stack(1));
     // The tabs go through the base and stand out of it by what they are longer.
-    k.outsideBy("D", k.minus(k.option("tabOut"), k.option("innerShort")), k.stack(1));
+    const tab = k.minus(k.option("tabOut"), k.option("innerShort"));
+    k.outsideBy("D", tab.mm > k.stack(1).mm ? tab : k.stack(1), k.stack(1));
     k.slides(k.face("tuck", "print"), k.face("front", "inside"), slide, 60);
     for (const end of ["left", "right"] as const) {
       k.slides(k.face(`wing ${end}`, "print"), k.face(`inner ${end}`, "print"), slide, 60);
       for (const from of ["front", "back"] as const) {
-        k.slides(k.face(`corner flap ${from} ${end}`, "inside"), k.face(`inner ${end}`, "inside"), half, 60);
-        k.slides(k.face(`corner flap ${from} ${end}`, "print"), k.face(`outer ${end}`, "inside"), half, 60);
+        k.slides(k.face(`corner flap ${from} ${end}`, "inside"), k.face(`inner ${end}`, "inside"), half, 30);
+        k.slides(k.face(`corner flap ${from} ${end}`, "print"), k.face(`outer ${end}`, "inside"), half, 30);
       }
     }
 

@@ -7,7 +7,7 @@ import type { Kit } from "../blank/kit";
 import type { Asks } from "../parameters/parameter";
 import type { Scope } from "../parameters/resolve";
 import { limit, type Construction, type Limit } from "./construction";
-import { fourPanelTube, tubeAsks } from "./parts/four-panel-tube";
+import { fourPanelTube, leastGluedDepth, tubeAsks } from "./parts/four-panel-tube";
 import { tuckAsks, tuckClosure } from "./parts/tuck-closure";
 
 const notchAsks: Asks = {
@@ -19,16 +19,16 @@ const notchAsks: Asks = {
 function tuckEnd(reverse: boolean): Pick<Construction, "ask" | "cannot" | "declare"> {
   const room = reverse ? "D - 2*t - 2" : "0.45*D";
   return {
-    ask: { ...tubeAsks, ...tuckAsks(room), ...notchAsks },
+    ask: { ...tubeAsks(reverse ? "a + slide" : "W"), ...tuckAsks(room, reverse ? "max(ease, t + slide)" : "ease"), ...notchAsks },
 
     cannot: (s: Scope): Limit[] => {
       const least = s["micro"] ? 18 : 11;
-      const { L = 0, t = 0, glue = 0, glueFoot = 0, glueTaper = 0, slitLock = 0, slit = 0, dust = 0, tuck = 0, notch = 0, notchDepth = 0 } = s;
+      const { t = 0, glue = 0, slitLock = 0, slit = 0, dust = 0, tuck = 0, notch = 0, notchDepth = 0 } = s;
       return [
         limit("D", { atLeast: reverse ? least + 2 * t + 2 : least / 0.45 }, reverse ? "the tuck would meet the other end" : "the two tucks would meet behind the front"),
         limit("W", { atLeast: Math.max(least / 0.8, 12 * t) }, "a tuck that holds would not swing in"),
-        limit("L", { atLeast: Math.max(12 * t, slitLock ? 2 * slit + 12 : 0, 2 * (dust + 0.5)) }, "crease and dust flaps need that length"),
-        limit("D", { atLeast: 2 * (glueFoot + glue * Math.tan((glueTaper * Math.PI) / 180)) + 6 }, "the ends of the glue flap would eat its glued edge"),
+        limit("L", { atLeast: Math.max(12 * t, slitLock ? 2 * slit + 18 : 0, 2 * (dust + 0.5)) }, "crease and dust flaps need that length"),
+        limit("D", { atLeast: leastGluedDepth(s) }, "the ends of the glue flap would eat its glued edge"),
         limit("L", { atLeast: glue + 2 }, "the glue flap would be wider than the back"),
         ...(notch ? [limit("notchDepth", { atMost: tuck - 2 }, "the tuck must cover the notch")] : []),
         ...(notch && notchDepth > 0 ? [limit("L", { atLeast: 40 }, "a notch leaves too little of the front edge")] : []),

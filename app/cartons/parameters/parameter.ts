@@ -3,7 +3,7 @@ import type { OptionValue, ParameterInfo, ParameterKind } from "../types";
 
 /**
  * One option. `default`, `atLeast` and `atMost` are figures or rules of thumb written as text over what is known
- * before them: L, W, D (inside, mm), t (caliper), a (crease allowance), micro (1 for flute board), and earlier options.
+ * before them: L, W, D (inside, mm), t (caliper), a and aLeast (greatest and least crease allowance), micro (1 for flute board), cardSlide and creaseSpacing (from the board), and earlier options.
  */
 export interface Ask {
   readonly label: string;

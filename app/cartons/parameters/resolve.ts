@@ -7,7 +7,7 @@ import type { Ask, Asks } from "./parameter";
 /** What rules of thumb may speak of. Switches are 1 or 0; a choice is the place of its value in the list, from 0. */
 export type Scope = Record<string, number>;
 
-export const BASE_VARIABLES = ["L", "W", "D", "t", "a", "micro", "cardSlide", "creaseSpacing"] as const;
+export const BASE_VARIABLES = ["L", "W", "D", "t", "a", "aLeast", "micro", "cardSlide", "creaseSpacing"] as const;
 
 interface CompiledAsk {
   readonly name: string;

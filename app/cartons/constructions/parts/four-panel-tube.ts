@@ -9,21 +9,35 @@ import { rectangle, rounded } from "../../blank/shapes";
 import type { Vertex } from "../../geometry/outline";
 import type { Asks } from "../../parameters/parameter";
 
+const PRACTICE = "engineering practice, no published source";
+
 export const UPRIGHT: LayerUse = { creases: "y" };
 export const ACROSS: LayerUse = { creases: "x" };
 
-export const tubeAsks: Asks = {
+/** `seamMost`: a further limit, as a rule, on how far the last panel may be pulled back. */
+export const tubeAsks = (seamMost: string): Asks => ({
   glue: {
     label: "Glue flap", kind: "length", default: "min(if(micro, if(D < 150, 20, if(D < 300, 25, 30)), if(D < 60, 10, if(D < 150, 13, if(D < 250, 15, 18)))), L - 5, W - 5)",
-    atLeast: 6, atMost: "min(L, W) - 2", why: "a bead of 6 to 8 mm and its tolerance", source: "engineering practice, no published source", because: "it must lie on one side panel and hold a bead of glue",
+    atLeast: 6, atMost: "min(L, W) - 2", why: "a bead of 6 to 8 mm and its tolerance", source: PRACTICE, because: "it must lie on one side panel and hold a bead of glue",
   },
-  glueFoot: { label: "Glue flap, set back at its ends", kind: "length", default: "if(micro, t + 1, 1)", atLeast: 0, atMost: "D/4", why: "clears the dust flaps", source: "engineering practice, no published source" },
+  glueFoot: { label: "Glue flap, set back at its ends", kind: "length", default: "if(micro, t + 1, 1)", atLeast: 0, atMost: "D/4", why: "clears the dust flaps", source: PRACTICE },
   glueTaper: { label: "Glue flap, angle of its ends", kind: "angle", default: "if(micro, 20, 15)", atLeast: 0, atMost: 45, why: "leads the flap in and keeps glue from the ends", source: "10 to 20 degrees, common practice, no source" },
   seam: {
-    label: "Last panel, pulled back", kind: "length", default: "if(micro, 1, 0.5)", atLeast: 0, atMost: "W/8",
-    why: "the raw edge must not stand proud after gluing", source: "engineering practice, no published source",
+    label: "Last panel, pulled back", kind: "length", default: `if(micro, 1, min(0.5, ${seamMost}))`, atLeast: 0, atMost: `min(W/8, 0.3*glue, ${seamMost})`,
+    why: "the raw edge must not stand proud after gluing", source: PRACTICE, because: "the seam must stay covered, and the dust flap beside it must reach its lock",
   },
-};
+});
+
+/** Of flap depth times D: the least glued area of a side seam (engineering practice, no published source). */
+const SEAM_SHARE = 0.6;
+
+/** mm. D below which set-backs and tapers leave less than that share of the seam glued. */
+export function leastGluedDepth({ glue = 0, glueFoot = 0, glueTaper = 0, seam = 0 }: Readonly<Record<string, number>>): number {
+  const covered = glue - seam;
+  const tapers = (glue * glue - seam * seam) * Math.tan((glueTaper * Math.PI) / 180);
+  const roundedOff = 1;
+  return (2 * glueFoot * covered + tapers + roundedOff) / (covered - SEAM_SHARE * glue);
+}
 
 /** Where a panel ends, at top or bottom: creased to a closure at a layer, or free, level with the middle of a layer. */
 export type End = { readonly crease: number } | { readonly free: number };
@@ -62,7 +76,7 @@ export function fourPanelTube(k: Kit, bottom: Ends, top: Ends, notch: Notch | nu
 
   k.inside("L", k.face("side 2", "inside"), k.face("side 1", "inside"));
   k.inside("W", k.face("back", "inside"), k.face("front", "inside"));
-  k.glued(k.face("glue flap", "print"), k.face("side 2", "inside"), 0.6 * glue * k.size.D);
+  k.glued(k.face("glue flap", "print"), k.face("side 2", "inside"), SEAM_SHARE * glue * k.size.D);
   k.outsideBy("L", k.stack(1), k.stack(1));
   k.outsideBy("W", k.stack(1), k.stack(1));
 

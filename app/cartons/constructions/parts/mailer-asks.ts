@@ -4,14 +4,14 @@ import type { Asks } from "../../parameters/parameter";
 const PRACTICE = "engineering practice, no published source";
 
 export const mailerAsks: Asks = {
-  rollPlay: { label: "Roll play", kind: "length", default: "max(if(micro, 0.5, 0.3), creaseSpacing - 2*t)", atLeast: 0.2, atMost: 4, why: "three boards rolled with no slack do not go over a springy flap; two creases need room for both channels", source: "strip of 3.5 to 4 mm for E flute, common practice" },
+  rollPlay: { label: "Roll play", kind: "length", default: "max(if(micro, 0.5, 0.3), creaseSpacing - t - 2*aLeast)", atLeast: 0.2, atMost: 4, why: "three boards rolled with no slack do not go over a springy flap; two creases need room for both channels", source: "strip of 3.5 to 4 mm for E flute, common practice" },
   innerShort: { label: "Inner side, short of the base", kind: "length", default: 0.3, atLeast: 0.1, atMost: 2, why: "it must not stand on the base before the roll lies flat", source: PRACTICE },
   stripIn: { label: "Roll, set in at its ends", kind: "length", default: "a + slide", atLeast: 0.2, atMost: "W/8", why: "clears front and back", source: PRACTICE },
   ears: { label: "Locking ears", kind: "switch", default: true, why: "they hold the lid shut in the gaps of the side walls", source: "0427 is known by them; which parts a code leaves out differs by maker" },
   earSet: { label: "Inner side, set back for the ears", kind: "length", default: "2*t + 1", atLeast: "t + 0.5", atMost: "W/6", why: "the tuck passes in front of the inner wall and the ear goes in behind it", source: PRACTICE },
   tabs: { label: "Tabs a side", kind: "count", default: "if(W < 300.001, 2, 3)", atLeast: 1, atMost: 4, why: "two hold to 300 mm", source: PRACTICE },
   tabLength: { label: "Tab, length", kind: "length", default: "clamp(W/6, 12, 40)", atLeast: 8, atMost: "W/(tabs + 1)", why: "long enough to grip", source: PRACTICE },
-  tabOut: { label: "Tab, beyond the inner side's edge", kind: "length", default: "t + 0.5", atLeast: "0.8*t + innerShort", atMost: "2*t + 1", why: "through the base's board", source: PRACTICE },
+  tabOut: { label: "Tab, beyond the inner side's edge", kind: "length", default: "t + innerShort + 0.2", atLeast: "0.8*t + innerShort", atMost: "2*t + 1", why: "through the base's board", source: PRACTICE },
   tabTaper: { label: "Tab, angle of its ends", kind: "angle", default: 5, atLeast: 0, atMost: 45, why: "leads in", source: PRACTICE },
   slotLonger: { label: "Slot, longer than the tab", kind: "length", default: 1.5, atLeast: 0.4, atMost: 4, why: "tabs and slots are cut apart from each other", source: "tab + 1 to 2 mm, common practice" },
   slotWider: { label: "Slot, wider than the board", kind: "length", default: 0.6, atLeast: 0.2, atMost: 2, why: "the tab goes in, and stays", source: "caliper + 0.5 to 1 mm, common practice" },

@@ -82,7 +82,8 @@ export function tuckFlap(k: Kit): Vertex[] {
 
 /** Where the ear hangs on the tuck's end, from the lid crease: [from, to]. */
 function earPlace(k: Kit): [number, number] {
-  const from = 1;
+  // Below the roll, whose inner face is level with the lid's.
+  const from = k.edge(0, { creases: "x" }).mm + 0.3;
   return [from, from + k.number("earHigh")];
 }
 
@@ -98,6 +99,12 @@ export function earedTuck(k: Kit, width: number): Vertex[] {
     { x: -half, y: 0 }, { x: half, y: 0 }, { x: half, y: earEnd }, { x: narrow, y: bend, r: 1 }, { x: narrow, y: deep, r },
     { x: -narrow, y: deep, r }, { x: -narrow, y: bend, r: 1 }, { x: -half, y: earEnd },
   ]);
+}
+
+/** The edge of an eared tuck that an ear hangs on: the outermost one on that side. */
+export function earEdge(tuck: readonly Vertex[], end: "left" | "right"): number {
+  const outermost = Math[end === "left" ? "min" : "max"](...tuck.map((v) => v.x));
+  return tuck.findIndex((v, i) => v.x === outermost && tuck[(i + 1) % tuck.length]!.x === outermost);
 }
 
 /** On the tuck's end, x from the lid's crease; rounded like a half circle. */

@@ -11,8 +11,10 @@ import { ACROSS, type Tube } from "./four-panel-tube";
 
 const PRACTICE = "engineering practice, no published source";
 
-/** Options of both ends; `room` is what a tongue may take of D, as a rule. */
-export const tuckAsks = (room: string): Asks => ({
+/** Options of both ends, as rules: `room` is what a tongue may take of D, `besideGlue` how far its end stays from the side it has the glue flap on. */
+export const tuckAsks = (room: string, besideGlue: string): Asks => tuckOptions(room, `2.3 + shoulderShort + a + ${besideGlue}`);
+
+const tuckOptions = (room: string, leastSlit: string): Asks => ({
   tuck: {
     label: "Tuck", kind: "length", default: `max(if(micro, 18, 11), min(if(micro, clamp(10 + W/4, 18, 35), clamp(4 + W/3, 11, 20)), 0.8*W, ${room}))`,
     atLeast: 8, atMost: `min(0.8*W, ${room})`, why: "deep enough to hold by friction, short enough to swing in", source: PRACTICE, because: "the tongue must swing in past the front edge and clear the other end's",
@@ -22,8 +24,9 @@ export const tuckAsks = (room: string): Asks => ({
   tuckTaper: { label: "Tuck, taper a side", kind: "angle", default: "if(micro, 3, 2)", atLeast: 0, atMost: 15, why: "leads in", source: PRACTICE },
   ease: { label: "Lid, ease a side", kind: "length", default: "if(micro, 1, 0.5)", atLeast: 0.2, atMost: "L/10", why: "the lid must not scrape the sides", source: "0.5 to 1 mm total a side, common practice" },
   lidLead: { label: "Lid, taper at its root", kind: "length", default: 3, atLeast: 1, atMost: "W/3", why: "the cuts of lid and dust flap open as a wedge from the crease corner", source: PRACTICE },
-  slitLock: { label: "Slit lock", kind: "switch", default: "if(L < if(micro, 80, 30), 0, 1)", why: "holds the lid shut where the crease is long enough", source: PRACTICE },
-  slit: { label: "Slit", kind: "length", default: "if(micro, clamp(0.08*L, 8, 12), clamp(0.1*L, 4, 8))", atLeast: "3.5 + t/2 + if(micro, 1.5, 0)", atMost: "L/2 - 6", why: "engages the shoulder by 2 mm or more", source: PRACTICE, because: "the shoulders must engage by 2 mm and 12 mm of crease must be left" },
+  shoulderShort: { label: "Shoulder, shorter than the slit", kind: "length", default: "if(micro, 2, 1)", atLeast: 0, atMost: 4, why: "the shoulder goes into the slit without forcing its end", source: PRACTICE },
+  slit: { label: "Slit", kind: "length", default: `max(${leastSlit}, if(micro, clamp(0.08*L, 8, 12), clamp(0.1*L, 4, 8)))`, atLeast: leastSlit, atMost: `max(${leastSlit}, L/2 - 6)`, why: "engages the shoulder by 2 mm or more", source: PRACTICE, because: "the shoulders must engage by 2 mm and 12 mm of crease must be left" },
+  slitLock: { label: "Slit lock", kind: "switch", default: "if(L < max(if(micro, 80, 30), 2*slit + 18), 0, 1)", why: "holds the lid shut where the crease is long enough", source: PRACTICE },
   slitDrop: { label: "Lock edge below the crease", kind: "length", default: "if(0.5 < t, max(1.5*t + if(micro, 0, 0.2), minGap), 0)", atLeast: 0, atMost: "tuck/3", why: "in thicker board the edge must lie under the dust flap", source: PRACTICE },
   hook: { label: "Slit end, hook radius", kind: "length", default: 1, atLeast: 0, atMost: 3, why: "a straight slit tears on along the crease", source: PRACTICE },
   dust: { label: "Dust flap", kind: "length", default: "min(L/2 - if(micro, 2, 1), if(micro, max(20, 0.6*W), max(12, 0.75*W)))", atLeast: "if(slitLock, slit + 2, 8)", atMost: "L/2 - 0.5", why: "holds the lid up and never meets the other", source: PRACTICE, because: "the two dust flaps must not meet, and the shoulder needs its length" },
@@ -112,12 +115,14 @@ function dustFlap(k: Kit, width: number, start: number, lockIsFar: boolean): Ver
   const hinge = Math.max(set - start + hingeFace, 0);
   const lock = Math.min(wall - shoulder, width);
   const step = lock - k.number("shoulderStep");
-  const held = k.isOn("slitLock") ? k.number("slit") - 1 : 0;
+  const held = k.isOn("slitLock") ? k.number("slit") - k.number("shoulderShort") : 0;
   const far = width - lock;
+  // Without a shoulder the edge is clear of the tongue before the tongue's end begins.
+  const clear = start + k.number("ease") / 2;
   const corners: Corner[] = [{ x: 0, y: 0 }, { x: width, y: 0 }];
   if (held > 0) corners.push({ x: lock, y: far }, { x: lock, y: held, r: 0.5 }, { x: step, y: held, r: 0.5 });
-  else corners.push({ x: step, y: width - step });
-  const from = held > 0 ? held : width - step;
+  else corners.push({ x: step, y: clear });
+  const from = held > 0 ? held : clear;
   corners.push({ x: step - slope(k.number("dustTaper"), depth - from), y: depth, r: radius }, { x: hinge + slope(k.number("dustHinge"), depth - hinge), y: depth, r: radius }, { x: hinge, y: hinge });
   const outline = rounded(hinge > 0 ? corners : corners.slice(0, -1));
   return lockIsFar ? outline : moved(flipped(outline), width);
