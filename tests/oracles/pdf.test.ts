@@ -5,6 +5,7 @@ import { pdfOf, type PdfOptions } from "~/cartons/export/pdf/document";
 import { LAYER_ORDER, PROCESSING_STEPS } from "~/cartons/export/processing-steps";
 import { layersSeen } from "~/cartons/export/sheet-view";
 import { boundsOf } from "~/cartons/geometry/path";
+import type { Carton } from "~/cartons/types";
 import { latoFonts } from "~/services/fonts.server";
 import { cases, SIDES } from "./cases";
 import { withPdf, type PdfFile } from "./pdf-tools";
@@ -21,6 +22,12 @@ function boxOf(info: string, name: string): [number, number, number, number] {
   const match = new RegExp(`${name}:\\s+([\\d.]+)\\s+([\\d.]+)\\s+([\\d.]+)\\s+([\\d.]+)`).exec(info);
   return match!.slice(1).map((v) => Number(v) / POINTS) as [number, number, number, number];
 }
+
+/** The extent of each piece, from its outline. */
+const sizes = (carton: Carton): string[] => carton.layers.cut.filter((p) => p.role === "outline").map(({ path }) => {
+  const b = boundsOf([path]);
+  return `${Number((b.maxX - b.minX).toFixed(2))} × ${Number((b.maxY - b.minY).toFixed(2))}`;
+});
 
 describe.each(cases)("PDF of $name", ({ carton }) => {
   describe.each(SIDES)("seen from the %s side", (side) => {
@@ -83,7 +90,7 @@ describe.each(cases)("PDF of $name", ({ carton }) => {
         for (const words of [
           "Łemon tea, 20 bags", "Ninefold Tea", "2026-11-24", "O. Brandt", carton.construction.name,
           "If this bar does not measure 100 mm, print again at actual size.", "Calculated: cut and fold a sample before the run.",
-          `${Number(carton.blank.width.toFixed(2))} × ${Number(carton.blank.height.toFixed(2))}`,
+          ...sizes(carton),
           `${Number(carton.inside.L.toFixed(2))} × ${Number(carton.inside.W.toFixed(2))} × ${Number(carton.inside.D.toFixed(2))}`,
           side === "inside" ? "inside" : "print side",
         ]) expect(text).toContain(words);

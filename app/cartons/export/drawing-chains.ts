@@ -21,7 +21,7 @@ interface Place {
 
 export function chainsOf(carton: Carton, shapes: readonly Shape[], side: Side, room: Room): Dimension[] {
   const byPart = carton.fold.parts.map((part) => {
-    const own = shapes.filter((s) => s.panel.part === part.name);
+    const own = carton.fold.parts.length === 1 ? shapes : shapes.filter((s) => s.panel.part === part.name);
     const rootName = carton.fold.panels[part.root]?.name;
     return { name: part.name, own, root: own.find((s) => s.panel.name === rootName) ?? own[0], bounds: own.length > 0 ? unite(own.map((s) => s.bounds)) : null };
   });
@@ -47,29 +47,33 @@ interface Piece {
 function chainsOfPiece(piece: Piece, root: Shape, others: readonly Box[]): Dimension[] {
   const isOpen = (m: Measures, towards: -1 | 1) => !others.some((b) => overlap(b, beyond(piece.bounds, m, towards)));
   const below = isOpen("x", -1) ? -1 : 1;
-  const leftwards = isOpen("y", -1) ? -1 : 1;
   const middle = (s: Shape, m: Measures) => (lowOf(s.bounds, other(m)) + highOf(s.bounds, other(m))) / 2;
+  // The root's column is measured on the side where it lies nearer: left first, right where another piece or the row is in the way.
+  const isLeft = middle(root, "y") - piece.bounds.minX <= piece.bounds.maxX - middle(root, "y");
+  const sides: readonly (-1 | 1)[] = isLeft ? [-1, 1] : [1, -1];
+  const near = sides.find((towards) => isOpen("y", towards)) ?? sides[0]!;
   const row = chain(piece, { measures: "x", towards: below, level: 0 }, middle(root, "x"));
-  const column = chain(piece, { measures: "y", towards: leftwards, level: 0 }, middle(root, "y"));
+  const column = chain(piece, { measures: "y", towards: near, level: 0 }, middle(root, "y"));
   const opposite = -below as -1 | 1;
   const width = overall(piece, isOpen("x", opposite) ? { measures: "x", towards: opposite, level: 0 } : { measures: "x", towards: below, level: 1 });
-  const height = overall(piece, { measures: "y", towards: leftwards, level: column.length > 1 ? 1 : 0 });
+  const height = overall(piece, { measures: "y", towards: near, level: column.length > 1 ? 1 : 0 });
   const dimensions = [...row, ...column, width, height];
   // A single figure that says what the overall says already is left out.
   if (column.length === 1 && Math.abs(column[0]!.value - height.value) < SAME) dimensions.splice(dimensions.indexOf(column[0]!), 1);
-  const far = -leftwards as -1 | 1;
+  const far = -near as -1 | 1;
   if (isOpen("y", far)) dimensions.push(...farColumn(piece, row, column, far));
   return dimensions;
 }
 
-/** The column at the row's other end, where its figures are not those of the root's column. */
+/** The outermost column on the other side whose figures are not those of the root's column. */
 function farColumn(piece: Piece, row: readonly Dimension[], column: readonly Dimension[], towards: -1 | 1): Dimension[] {
-  const ends = row.map((d) => (along(d.from, "x") + along(d.to, "x")) / 2);
-  if (ends.length < 2) return [];
-  const at = towards > 0 ? Math.max(...ends) : Math.min(...ends);
-  const far = chain(piece, { measures: "y", towards, level: 0 }, at);
+  const middles = row.map((d) => (along(d.from, "x") + along(d.to, "x")) / 2).sort((a, b) => towards * (b - a));
   const known = new Set(column.map((d) => d.text));
-  return far.every((d) => known.has(d.text)) ? [] : far;
+  for (const at of middles.slice(0, 2)) {
+    const far = chain(piece, { measures: "y", towards, level: 0 }, at);
+    if (far.length > 0) return far.every((d) => known.has(d.text)) ? [] : far;
+  }
+  return [];
 }
 
 /** The half plane beyond the piece on one side, as wide as the piece. */

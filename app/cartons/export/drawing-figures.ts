@@ -1,7 +1,7 @@
 // Figures inside panels: L, W and D as asked, and whatever else of the ledger no chain shows.
 import type { Carton, LedgerRow } from "../types";
 import type { Dimension, Room } from "./drawing";
-import { across, along, boxAround, figureWidth, highOf, isFree, lowOf, other, pointAt, spanOf, type Measures, type Shape } from "./drawing-space";
+import { across, along, boxAround, figureWidth, highOf, isFree, isWithin, lowOf, other, pointAt, spanOf, type Measures, type Shape } from "./drawing-space";
 import { shown } from "./number";
 import { seenPoint, type Side } from "./sheet-view";
 
@@ -57,18 +57,23 @@ function figure(row: LedgerRow, shape: Shape, side: Side, room: Room): Dimension
   for (const at of [...SHARES.map((f) => from + (to - from) * f), across(a, m)]) {
     const span = spanOf(shape.ring, m, at);
     if (!span || span.low > low + size || span.high < high - size) continue;
-    const textAt = pointAt(m, (low + high) / 2, at);
-    const line = m === "x" ? boxAround(textAt, high - low, size * 0.5) : boxAround(textAt, size * 0.5, high - low);
-    const words = m === "x" ? boxAround(textAt, width + size, size * 1.6) : boxAround(textAt, size * 1.6, width + size);
-    if (words.minX < shape.bounds.minX || words.maxX > shape.bounds.maxX || words.minY < shape.bounds.minY || words.maxY > shape.bounds.maxY) continue;
-    if (!isFree(line, room.taken) || !isFree(words, room.taken) || !isFree(words, room.lines)) continue;
-    room.taken.push(words);
-    room.lines.push(line);
-    return {
-      id: `ledger:${row.id}`, kind: isAsked ? "asked" : "panel", measures: m,
-      from: pointAt(m, low, at), to: pointAt(m, high, at), away: pointAt(m, 0, 1), value: row.value, text, textAt, fits: true,
-      row: row.id, parameter: row.parameter, extensions: [],
-    };
+    const middle = pointAt(m, (low + high) / 2, at);
+    const line = m === "x" ? boxAround(middle, high - low, size * 0.5) : boxAround(middle, size * 0.5, high - low);
+    if (!isFree(line, room.taken)) continue;
+    // The figure stands in the middle of its line, or off it where a name is in the way.
+    for (const share of [0.5, 0.36, 0.64, 0.24, 0.76]) {
+      const textAt = pointAt(m, low + (high - low) * share, at);
+      const words = m === "x" ? boxAround(textAt, width + size * 0.6, size * 1.6) : boxAround(textAt, size * 1.6, width + size * 0.6);
+      if (!isWithin(words, shape.bounds) || along(textAt, m) - width / 2 - size < low || along(textAt, m) + width / 2 + size > high) continue;
+      if (!isFree(words, room.taken) || !isFree(words, room.lines)) continue;
+      room.taken.push(words);
+      room.lines.push(line);
+      return {
+        id: `ledger:${row.id}`, kind: isAsked ? "asked" : "panel", measures: m,
+        from: pointAt(m, low, at), to: pointAt(m, high, at), away: pointAt(m, 0, 1), value: row.value, text, textAt, fits: true,
+        row: row.id, parameter: row.parameter, extensions: [],
+      };
+    }
   }
   return null;
 }

@@ -19,9 +19,14 @@ export interface GrainArrow extends Line {
   readonly angle: 0 | 90;
 }
 
+/** A strip is narrow when a name of ten letters would take most of it: times the size of the letters. */
+const NARROW = 14;
+
 /** A name in capitals: the wanted size, or as small as still reads; null where even that has no room. */
 function fitted(text: string, width: number, height: number, wanted: number): { size: number; angle: 0 | 90 } | null {
   for (const size of [wanted, wanted * 0.8, wanted * 0.65]) {
+    // In a tall strip names are turned, whatever their length, so that figures find room beside them.
+    if (height > 2.2 * width && width < NARROW * size && capitalsWidth(text, size) <= height && size * 1.3 <= width) return { size, angle: 90 };
     if (capitalsWidth(text, size) <= width && size * 1.3 <= height) return { size, angle: 0 };
     if (capitalsWidth(text, size) <= height && size * 1.3 <= width) return { size, angle: 90 };
   }
@@ -42,7 +47,7 @@ export function labelsOf(shapes: readonly Shape[], room: Room): PanelLabel[] {
 }
 
 function labelBox(text: string, at: Point, size: number, angle: 0 | 90): Box {
-  const width = capitalsWidth(text, size) + size;
+  const width = capitalsWidth(text, size) + size * 0.4;
   return angle === 0 ? boxAround(at, width, size * 1.8) : boxAround(at, size * 1.8, width);
 }
 

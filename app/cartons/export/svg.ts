@@ -16,8 +16,10 @@ export interface SvgOptions {
 
 const MARKUP: Readonly<Record<string, string>> = { "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;" };
 
+const PLAIN = /^[ !#-%'-;=?-~]*$/;
+
 /** Text fit for XML: mark-up escaped, characters that XML forbids left out. */
-export const xmlText = (text: string): string => text.replace(/[\u0000-\u0008\u000B\u000C\u000E-\u001F\uFFFE\uFFFF]/g, "").replace(/[&<>"]/g, (c) => MARKUP[c]!);
+export const xmlText = (text: string): string => PLAIN.test(text) ? text : text.replace(/[\u0000-\u0008\u000B\u000C\u000E-\u001F\uFFFE\uFFFF]/g, "").replace(/[&<>"]/g, (c) => MARKUP[c]!);
 
 /**
  * The carton as an SVG document at true size: width and height in mm, one user unit a millimetre, y downwards, the

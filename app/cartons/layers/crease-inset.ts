@@ -1,6 +1,5 @@
 // For files only: a crease line stops short of the cut that it meets, so that rule does not stand on rule.
 import type { Path, Point, Vertex } from "../geometry/outline";
-import { eachEdge } from "../geometry/path";
 import { SAME_POINT } from "../geometry/tolerance";
 import type { Carton, LayerPath, Layers } from "../types";
 
@@ -11,12 +10,23 @@ function distanceTo(p: Point, a: Point, b: Point): number {
   return Math.hypot(p.x - a.x - f * dx, p.y - a.y - f * dy);
 }
 
+/** Does the point lie on one of the paths? Most edges are told apart by their boxes alone: this runs for each end of each crease. */
 function touches(p: Point, paths: readonly Path[]): boolean {
-  return paths.some((path) => {
-    let meets = false;
-    eachEdge(path, (a, b) => { meets ||= a.bulge === 0 ? distanceTo(p, a, b) < SAME_POINT : Math.hypot(p.x - a.x, p.y - a.y) < SAME_POINT; });
-    return meets;
-  });
+  for (const { closed, vertices } of paths) {
+    const edges = closed ? vertices.length : vertices.length - 1;
+    for (let i = 0; i < edges; i++) {
+      const a = vertices[i]!;
+      if (Math.abs(p.x - a.x) < SAME_POINT && Math.abs(p.y - a.y) < SAME_POINT) return true;
+      if (a.bulge !== 0) continue;
+      const b = vertices[i + 1 === vertices.length ? 0 : i + 1]!;
+      if ((p.x < a.x - SAME_POINT && p.x < b.x - SAME_POINT) || (p.x > a.x + SAME_POINT && p.x > b.x + SAME_POINT)) continue;
+      if ((p.y < a.y - SAME_POINT && p.y < b.y - SAME_POINT) || (p.y > a.y + SAME_POINT && p.y > b.y + SAME_POINT)) continue;
+      if (distanceTo(p, a, b) < SAME_POINT) return true;
+    }
+    const last = vertices[vertices.length - 1];
+    if (!closed && last && Math.abs(p.x - last.x) < SAME_POINT && Math.abs(p.y - last.y) < SAME_POINT) return true;
+  }
+  return false;
 }
 
 /** The carton's layers as they go to a cutter: creases pulled back by the options `creaseInset` and `creaseInsetInner`, mm. */

@@ -1,6 +1,6 @@
 // The same carton over several sheets of office paper at 100 %, to be taped together.
 import { PDFDocument } from "pdf-lib";
-import type { Box } from "../../geometry/outline";
+import type { Box, Point } from "../../geometry/outline";
 import type { Carton, Layers } from "../../types";
 import { drawingOf, type Drawing } from "../drawing";
 import { layersSeen, sideWords } from "../sheet-view";
@@ -10,7 +10,7 @@ import { drawFigures } from "./figures";
 import { embedFaces, oneLine, type Faces } from "./fonts";
 import { createInk, type Ink } from "./ink";
 import { groupsFor, LEGEND, registerGroups } from "./layer-groups";
-import { unite } from "../drawing-space";
+import { capitalsWidth, unite } from "../drawing-space";
 import { boundsOf } from "../../geometry/path";
 import { drawCheckBar } from "./sheet";
 
@@ -85,7 +85,7 @@ function drawTile(ink: Ink, place: Place, layers: Layers, drawing: Drawing, opti
     ink.box(window, "W n");
     ink.moved(window.minX - left, window.maxY - top, () => {
       drawLayers(ink, layers);
-      drawFigures(ink, drawing, faces);
+      drawFigures(ink, shownOn(drawing, { minX: left, maxX: left + tile.width, minY: top - tile.height, maxY: top }), faces);
     });
   });
   ink.layer(LEGEND.key, () => {
@@ -100,6 +100,16 @@ function drawTile(ink: Ink, place: Place, layers: Layers, drawing: Drawing, opti
     const about = `${oneLine(options.title).slice(0, 40)}, revision ${oneLine(options.revision)}, ${sideWords(options.side)}`;
     ink.text(about, { x: EDGE, y: EDGE + 0.6 }, { face: faces.regular, size: 2.6 });
   });
+}
+
+/** Only the names and arrows that reach into this part of the drawing: words cut off by the window would still be read aloud. */
+function shownOn(drawing: Drawing, part: Box): Drawing {
+  const reaches = (at: Point, half: number) => at.x + half > part.minX && at.x - half < part.maxX && at.y + half > part.minY && at.y - half < part.maxY;
+  return {
+    ...drawing,
+    labels: drawing.labels.filter((l) => reaches(l.at, capitalsWidth(l.text, l.size) / 2)),
+    grain: drawing.grain.filter((g) => reaches(g.at, Math.hypot(g.to.x - g.from.x, g.to.y - g.from.y) / 2)),
+  };
 }
 
 /** Crosses on the middle of each overlap: lay one sheet's on the other's. */
