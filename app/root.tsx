@@ -1,9 +1,29 @@
-import { Links, Meta, Outlet, Scripts, ScrollRestoration } from "react-router";
+import type { ReactNode } from "react";
+import { Links, Meta, Outlet, Scripts, ScrollRestoration, useRouteLoaderData } from "react-router";
+import type { Route } from "./+types/root";
+import type { Viewer } from "./auth/viewer";
+import { ErrorPage } from "./components/error-page";
+import { PreferencesProvider, readPreferences } from "./components/preferences";
+import { ToastProvider } from "./components/toast";
+import { TopStrip } from "./components/top-strip";
 import "./app.css";
 
-export default function App() {
+export const meta: Route.MetaFunction = () => [{ title: "Cartonwright" }];
+
+export const links: Route.LinksFunction = () => [
+  { rel: "icon", href: "/favicon.ico", sizes: "32x32" },
+  { rel: "icon", href: "/favicon.svg", type: "image/svg+xml" },
+];
+
+export function loader({ request }: Route.LoaderArgs) {
+  return { preferences: readPreferences(request.headers.get("Cookie")), viewer: null as Viewer | null };
+}
+
+export function Layout({ children }: { children: ReactNode }) {
+  const root = useRouteLoaderData<typeof loader>("root");
+  const preferences = root?.preferences ?? { theme: "system", units: "mm" };
   return (
-    <html lang="en">
+    <html lang="en" data-theme={preferences.theme === "system" ? undefined : preferences.theme} suppressHydrationWarning>
       <head>
         <meta charSet="utf-8" />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
@@ -11,10 +31,28 @@ export default function App() {
         <Links />
       </head>
       <body>
-        <Outlet />
+        <a href="#content" className="skip-link">Skip to the content</a>
+        <PreferencesProvider initial={preferences}>
+          <ToastProvider>{children}</ToastProvider>
+        </PreferencesProvider>
         <ScrollRestoration />
         <Scripts />
       </body>
     </html>
+  );
+}
+
+/** Pages bring their own strip: the Bench has one that is different. */
+export default function App() {
+  return <Outlet />;
+}
+
+export function ErrorBoundary({ error }: Route.ErrorBoundaryProps) {
+  const root = useRouteLoaderData<typeof loader>("root");
+  return (
+    <>
+      <TopStrip viewer={root?.viewer ?? null} />
+      <ErrorPage error={error} />
+    </>
   );
 }

@@ -1,8 +1,11 @@
-import { type RouteConfig, index, route } from "@react-router/dev/routes";
+import { type RouteConfig, index, layout, route } from "@react-router/dev/routes";
 
 // The table of contents of the product, grouped by area. Tests and the authorisation walk read this same table.
 export default [
-  index("routes/home.tsx"),
+  // Pages of text, under the common strip
+  layout("routes/with-strip.tsx", [
+    index("routes/desk.tsx"),
+  ]),
 
   // Service
   route("health", "routes/service/health.ts"),

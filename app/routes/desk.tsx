@@ -1,0 +1,9 @@
+import { Page, PageHeader } from "~/components/page";
+
+export default function Desk() {
+  return (
+    <Page>
+      <PageHeader title="Desk" large />
+    </Page>
+  );
+}
