@@ -176,12 +176,13 @@ function dimension(piece: Piece, place: Place, low: number, high: number, id: st
 function rowFor(piece: Piece, m: Measures, low: number, high: number, panel: string | null): LedgerRow | null {
   let found: LedgerRow | null = null;
   for (const row of piece.rows) {
-    if (!row.mark || row.group === "asked") continue;
+    if (!row.mark || row.group === "asked" || Math.abs(row.value - (high - low)) > SAME) continue;
     const a = seenPoint(row.mark.from, piece.side);
     const b = seenPoint(row.mark.to, piece.side);
     if (Math.abs(across(a, m) - across(b, m)) > SAME) continue;
-    if (Math.abs(Math.min(along(a, m), along(b, m)) - low) > SAME || Math.abs(Math.max(along(a, m), along(b, m)) - high) > SAME) continue;
+    // The panel's own figure: its mark may take in tabs and ears that the figure leaves out.
     if (row.mark.panel === panel) return row;
+    if (Math.abs(Math.min(along(a, m), along(b, m)) - low) > SAME || Math.abs(Math.max(along(a, m), along(b, m)) - high) > SAME) continue;
     found ??= row;
   }
   return found;

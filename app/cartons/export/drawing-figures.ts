@@ -44,19 +44,22 @@ function figure(row: LedgerRow, shape: Shape, side: Side, room: Room): Dimension
   const b = seenPoint(row.mark!.to, side);
   const m: Measures | null = Math.abs(a.y - b.y) < STRAIGHT ? "x" : Math.abs(a.x - b.x) < STRAIGHT ? "y" : null;
   if (!m) return null;
-  const low = Math.min(along(a, m), along(b, m));
-  const high = Math.max(along(a, m), along(b, m));
+  const marked = { low: Math.min(along(a, m), along(b, m)), high: Math.max(along(a, m), along(b, m)) };
   const isAsked = row.group === "asked";
   const text = isAsked ? `(${shown(row.value)})` : shown(row.value);
   const size = isAsked ? room.size * 1.15 : room.size;
   const width = figureWidth(text, size);
-  if (high - low < width + size * 1.4) return null;
+  if (row.value < width + size * 1.4) return null;
   const c = other(m);
   const from = lowOf(shape.bounds, c);
   const to = highOf(shape.bounds, c);
   for (const at of [...SHARES.map((f) => from + (to - from) * f), across(a, m)]) {
     const span = spanOf(shape.ring, m, at);
+    // A mark takes in tabs and ears that the figure leaves out: then the line stands where the panel itself is that wide.
+    const isTrue = isAsked || Math.abs(marked.high - marked.low - row.value) < STRAIGHT;
+    const { low, high } = isTrue || !span ? marked : span;
     if (!span || span.low > low + size || span.high < high - size) continue;
+    if (!isAsked && Math.abs(high - low - row.value) >= STRAIGHT) continue;
     const middle = pointAt(m, (low + high) / 2, at);
     const line = m === "x" ? boxAround(middle, high - low, size * 0.5) : boxAround(middle, size * 0.5, high - low);
     if (!isFree(line, room.taken)) continue;
