@@ -4,10 +4,11 @@ import { drawingOf } from "~/cartons/export/drawing";
 import { pdfOf, type PdfOptions } from "~/cartons/export/pdf/document";
 import { LAYER_ORDER, PROCESSING_STEPS } from "~/cartons/export/processing-steps";
 import { layersSeen } from "~/cartons/export/sheet-view";
-import { boundsOf } from "~/cartons/geometry/path";
+import { boundsOf, lengthOf } from "~/cartons/geometry/path";
 import type { Carton } from "~/cartons/types";
 import { latoFonts } from "~/services/fonts.server";
 import { cases, SIDES } from "./cases";
+import { lengthRead, strokedIn } from "./path-readers";
 import { withPdf, type PdfFile } from "./pdf-tools";
 
 const POINTS = 72 / 25.4;
@@ -79,6 +80,31 @@ describe.each(cases)("PDF of $name", ({ carton }) => {
           expect(new Set([...inside[0]!.matchAll(/\/Spot(\w+) (?:CS|cs)/g)].map((m) => m[1]))).toEqual(new Set([spot]));
           expect(inside[0]).not.toMatch(/\s(?:k|K|rg|RG|g|G)\s/);
           expect((inside[0]!.match(/ S(?:\s|$)/g) ?? []).length).toBeGreaterThanOrEqual(carton.layers[name].length);
+        }
+      });
+    });
+
+    it("strokes each layer at its length and extent, arcs to a hundredth of a millimetre", async () => {
+      const bytes = await pdfOf(carton, await options(side));
+      withPdf(bytes, (file) => {
+        const content = file.unpacked();
+        const layers = layersSeen(carton, side);
+        for (const name of LAYER_ORDER) {
+          if (layers[name].length === 0 || name === "glue") continue;
+          const own = strokedIn(new RegExp(`/OC /Layer${PROCESSING_STEPS[name].spot} BDC([\\s\\S]*?)EMC`).exec(content)![1]!);
+          expect(own.length).toBe(layers[name].length);
+          own.forEach((line, i) => {
+            const { path } = layers[name][i]!;
+            expect(line.isClosed).toBe(path.closed);
+            expect(Math.abs(lengthRead(line) - lengthOf(path))).toBeLessThan(0.02);
+            const box = boundsOf([path]);
+            const xs = line.points.map((p) => p.x);
+            const ys = line.points.map((p) => p.y);
+            expect(Math.max(...xs)).toBeCloseTo(box.maxX, 2);
+            expect(Math.min(...xs)).toBeCloseTo(box.minX, 2);
+            expect(Math.max(...ys)).toBeCloseTo(box.maxY, 2);
+            expect(Math.min(...ys)).toBeCloseTo(box.minY, 2);
+          });
         }
       });
     });

@@ -1,5 +1,5 @@
-// SVG read again by readers that know nothing of this product: Maker.js's importer of path data, and a small reader of
-// arcs written from the standard (SVG 1.1, appendix F.6.5: end points to centre).
+// SVG read again by readers that know nothing of this product: Maker.js's importer of path data, and a reader of path data
+// written from the standard (path-readers.ts).
 import makerjs from "makerjs";
 import { describe, expect, it } from "vitest";
 import { svgOf } from "~/cartons/export/svg";
@@ -7,33 +7,7 @@ import { LAYER_ORDER, PROCESSING_STEPS } from "~/cartons/export/processing-steps
 import { layersSeen } from "~/cartons/export/sheet-view";
 import { arcOf, eachEdge, lengthOf } from "~/cartons/geometry/path";
 import { cases, SIDES } from "./cases";
-
-interface Corner { x: number; y: number; centre: { x: number; y: number } | null }
-
-/** Corners of one path's data, with the centre of the arc that ends in each. */
-function readPath(d: string): { corners: Corner[]; closed: boolean } {
-  const tokens = d.match(/[MLAZ]|-?\d+(?:\.\d+)?/g) ?? [];
-  expect(tokens.join("").length, "nothing but M, L, A, Z and plain numbers").toBe(d.replace(/ /g, "").length);
-  const corners: Corner[] = [];
-  let i = 0;
-  let isClosed = false;
-  const next = () => Number(tokens[i++]);
-  while (i < tokens.length) {
-    const command = tokens[i++];
-    if (command === "Z") isClosed = true;
-    else if (command === "A") {
-      const [r, ry, turn, large, sweep] = [next(), next(), next(), next(), next()] as [number, number, number, number, number];
-      expect(ry).toBe(r);
-      expect(turn).toBe(0);
-      const from = corners[corners.length - 1]!;
-      const to = { x: next(), y: next() };
-      const [hx, hy] = [(from.x - to.x) / 2, (from.y - to.y) / 2];
-      const k = Math.sqrt(Math.max(0, (r * r - hx * hx - hy * hy) / (hx * hx + hy * hy))) * (large === sweep ? -1 : 1);
-      corners.push({ ...to, centre: { x: k * hy + (from.x + to.x) / 2, y: -k * hx + (from.y + to.y) / 2 } });
-    } else corners.push({ x: next(), y: next(), centre: null });
-  }
-  return { corners, closed: isClosed };
-}
+import { areaRead, readSvgPath } from "./path-readers";
 
 describe.each(cases)("SVG of $name", ({ carton }) => {
   describe.each(SIDES)("seen from the %s side", (side) => {
@@ -64,7 +38,7 @@ describe.each(cases)("SVG of $name", ({ carton }) => {
     it("gives the same points back to a thousandth of a millimetre", () => {
       for (const [, , , type, , body] of groups) {
         const name = LAYER_ORDER.find((n) => PROCESSING_STEPS[n].type === type)!;
-        const read = [...body!.matchAll(/ d="([^"]+)"/g)].map((m) => readPath(m[1]!));
+        const read = [...body!.matchAll(/ d="([^"]+)"/g)].map((m) => readSvgPath(m[1]!));
         expect(read.length).toBe(layers[name].length);
         layers[name].forEach(({ path }, i) => {
           const { corners, closed } = read[i]!;
@@ -77,11 +51,22 @@ describe.each(cases)("SVG of $name", ({ carton }) => {
               const { centre, radius } = arcOf(a, b);
               // A flat arc's centre moves far for a rounded end; the arc itself does not.
               const slack = 1e-3 * Math.max(1, radius / Math.hypot(b.x - a.x, b.y - a.y)) ** 2;
-              expect(Math.hypot(to.centre!.x - origin.x - centre.x, origin.y - to.centre!.y - centre.y)).toBeLessThan(Math.max(slack, Math.sqrt(radius * 1e-3)));
-            } else expect(to.centre === null || k === path.vertices.length - 1).toBe(true);
+              expect(Math.hypot(to.arc!.x - origin.x - centre.x, origin.y - to.arc!.y - centre.y)).toBeLessThan(Math.max(slack, Math.sqrt(radius * 1e-3)));
+            } else expect(to.arc === null || k === path.vertices.length - 1).toBe(true);
           });
         });
       }
+    });
+
+    it("encloses the blank's area: outlines less holes", () => {
+      const cut = groups.find((g) => g[3] === "Cutting")![5]!;
+      const areas = [...cut.matchAll(/ d="([^"]+)"/g)].map((m) => readSvgPath(m[1]!)).filter((p) => p.closed).map((p) => Math.abs(areaRead(p)));
+      const roles = layers.cut.filter((p) => p.path.closed).map((p) => p.role);
+      const area = areas.reduce((sum, a, i) => sum + (roles[i] === "outline" ? a : -a), 0);
+      const holes = roles.map((r, i) => (r === "outline" ? 0 : areas[i]!)).reduce((sum, a) => sum + a, 0);
+      // The made-up blank's area is given without its hole.
+      const wanted = carton.construction.id === "made-up" ? carton.blank.area - holes : carton.blank.area;
+      expect(Math.abs(area - wanted)).toBeLessThan(0.05);
     });
 
     it("has the same extents and lengths for Maker.js", () => {
