@@ -1,7 +1,7 @@
 // One attempt: from parameters to the whole document, or the refusals that stand against it. Nothing is searched for here.
 import type { Board } from "./boards/board";
 import { minimumCreaseSpacing } from "./boards/crease-recipe";
-import { createKit } from "./blank/kit";
+import { createKit, type Kit } from "./blank/kit";
 import type { Blank } from "./blank/blank";
 import { checkMaking } from "./checks/making";
 import { bySeverity, foldCheckOf } from "./checks/fold-check";
@@ -26,7 +26,10 @@ export function grainOf({ construction }: Registered, board: Board, turned: bool
 }
 
 /** Runs a construction's declaration on an inside size, mm; refuses what it cannot be. */
-export function declare(registered: Registered, size: Size, options: Options, board: Board): Declared {
+export const declare = (registered: Registered, size: Size, options: Options, board: Board): Declared => declareWith(registered, size, options, board, (kit) => kit);
+
+/** The same with a kit that `through` may bend: how the checks are shown to fail. */
+export function declareWith(registered: Registered, size: Size, options: Options, board: Board, through: (kit: Kit) => Kit): Declared {
   const { construction, asks, compiled } = registered;
   const grain = grainOf(registered, board, options["grain"] === "turned");
   const { a90, slide } = board.card;
@@ -41,7 +44,7 @@ export function declare(registered: Registered, size: Size, options: Options, bo
   const refusals = strictest([...swapped, ...resolved.refusals, ...passed]);
   if (refusals.length > 0) return { ok: false, refusals };
   const kit = createKit({ board, size, grain, values: resolved.values, labels: (name) => asks[name]?.label ?? name, isSet: (name) => resolved.isSet.has(name) });
-  construction.declare(kit);
+  construction.declare(through(kit));
   return { ok: true, blank: kit.finish(), resolved };
 }
 

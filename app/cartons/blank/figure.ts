@@ -11,19 +11,26 @@ export const term = (name: string, value: number, times: number, source: Source)
 
 /** Adds terms up; terms of the same name, value and source are counted together, and what cancels is left out. */
 export function figure(terms: readonly Term[]): Figure {
-  const kept: Term[] = [];
-  let mm = 0;
-  for (const t of terms) {
-    mm += t.value * t.times;
-    const at = kept.findIndex((k) => k.name === t.name && k.value === t.value && k.source === t.source);
-    if (at < 0) kept.push(t);
-    else kept[at] = { ...t, times: kept[at]!.times + t.times };
-  }
-  return { mm, terms: kept.filter((t) => t.times !== 0) };
+  if (terms.length === 1) return { mm: terms[0]!.value * terms[0]!.times, terms: terms[0]!.times === 0 ? [] : terms };
+  return collect([terms], [1]);
 }
 
-export const plus = (...figures: readonly Figure[]): Figure => figure(figures.flatMap((f) => f.terms));
+export const plus = (...figures: readonly Figure[]): Figure => collect(figures.map((f) => f.terms), ONES);
+export const minus = (a: Figure, b: Figure): Figure => collect([a.terms, b.terms], [1, -1]);
+export const times = (f: Figure, factor: number): Figure => collect([f.terms], [factor]);
 
-export const times = (f: Figure, factor: number): Figure => figure(f.terms.map((t) => ({ ...t, times: t.times * factor })));
+const ONES: readonly number[] = [1, 1, 1, 1, 1, 1, 1, 1];
 
-export const minus = (a: Figure, b: Figure): Figure => plus(a, times(b, -1));
+function collect(lists: readonly (readonly Term[])[], factors: readonly number[]): Figure {
+  const kept: Term[] = [];
+  lists.forEach((terms, i) => {
+    for (const t of terms) {
+      const count = t.times * factors[i]!;
+      const at = kept.findIndex((k) => k.name === t.name && k.value === t.value && k.source === t.source);
+      if (at >= 0) kept[at] = { name: t.name, value: t.value, times: kept[at]!.times + count, source: t.source };
+      else kept.push(count === t.times ? t : { name: t.name, value: t.value, times: count, source: t.source });
+    }
+  });
+  const left = kept.filter((t) => t.times !== 0);
+  return { mm: left.reduce((sum, t) => sum + t.value * t.times, 0), terms: left };
+}

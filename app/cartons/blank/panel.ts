@@ -14,7 +14,9 @@ export interface Span {
   readonly from: number;
   readonly to: number;
   readonly kind: CreaseKind | "slit";
-  readonly twin: { readonly panel: Panel; readonly edge: number; readonly from: number; readonly to: number };
+  readonly panel: Panel;
+  /** The same stretch as the other panel has it. */
+  twin: Span | null;
 }
 
 export interface Feature {
@@ -114,14 +116,20 @@ export function twin(parent: Panel, parentEdge: number, child: Panel, frame: Iso
   const edge = baseEdge(child.outline);
   const base = child.outline[edge]!.x;
   const [, high] = edgeOnChildAxis(parent, parentEdge, frame);
-  const mine = { edge, from: from - base, to: to - base };
-  const theirs = { edge: parentEdge, from: high - to, to: high - from };
-  for (const [panel, span] of [[child, mine], [parent, theirs]] as const) {
-    const taken = panel.spans.some((s) => s.edge === span.edge && s.from < span.to - SAME_POINT && s.to > span.from + SAME_POINT);
-    if (taken) throw new Error(`two panels on one stretch of ${panel.name}`);
-  }
-  child.spans.push({ ...mine, kind, twin: { panel: parent, ...theirs } });
-  parent.spans.push({ ...theirs, kind, twin: { panel: child, ...mine } });
+  const mine: Span = { panel: child, edge, from: from - base, to: to - base, kind, twin: null };
+  const theirs: Span = { panel: parent, edge: parentEdge, from: high - to, to: high - from, kind, twin: mine };
+  mine.twin = theirs;
+  addSpan(child, mine);
+  addSpan(parent, theirs);
+}
+
+/** Keeps a panel's spans in the order in which its boundary is walked. */
+function addSpan(panel: Panel, span: Span): void {
+  const { spans } = panel;
+  if (spans.some((s) => s.edge === span.edge && s.from < span.to - SAME_POINT && s.to > span.from + SAME_POINT)) throw new Error(`two panels on one stretch of ${panel.name}`);
+  let at = spans.length;
+  while (at > 0 && (spans[at - 1]!.edge > span.edge || (spans[at - 1]!.edge === span.edge && spans[at - 1]!.from > span.from))) at--;
+  spans.splice(at, 0, span);
 }
 
 export const toDrawing = (panel: Panel, p: Point): Point => apply(panel.flat, p);

@@ -5,8 +5,8 @@
 import { limit, type Construction } from "./construction";
 import { gluedTray as tray, trayAsks } from "./parts/glued-tray";
 
-/** Between the two pieces on the drawing, mm: room for bleed round both. */
-const APART = 20;
+/** Between the two pieces on the drawing, mm: room for the widest bleed round both. */
+const APART = 24;
 
 export const lidAndBase: Construction = {
   id: "lid-and-base", name: "Lid and base", summary: "Two trays with glued corners; the lid goes over the base.",
@@ -34,7 +34,7 @@ export const lidAndBase: Construction = {
     const lidW = k.plus(inside.W, k.stack(2), k.option("clearance"));
     const lidD = k.option("lidD");
     const base = tray(k, inside, { part: "base", prefix: "", words: "Base: ", at: { c: 1, s: 0, x: 0, y: 0 }, own: true });
-    const up = inside.W.mm / 2 + inside.D.mm + lidW.mm / 2 + lidD.mm + APART + k.number("bleed") * 2;
+    const up = inside.W.mm / 2 + inside.D.mm + lidW.mm / 2 + lidD.mm + APART;
     const lid = tray(k, { L: lidL, W: lidW, D: lidD }, { part: "lid", prefix: "lid ", words: "Lid: ", at: { c: 1, s: 0, x: 0, y: up }, own: false });
 
     const half = k.option("clearance", 0.5);

@@ -11,11 +11,12 @@ const ringsOf = (paths: readonly Path[]): Point[][] => paths.map((p) => flatten(
 const pathsOf = (rings: readonly (readonly { x: number; y: number }[])[]): Path[] =>
   rings.map((ring) => ({ closed: true, vertices: ring.map(({ x, y }) => ({ x, y, bulge: 0 })) }));
 
-/** Areas grown (distance > 0) with round corners or shrunk (distance < 0) with sharp ones, mm. */
-export function offsetAreas(paths: readonly Path[], distance: number): Path[] {
-  const join = distance > 0 ? JoinType.Round : JoinType.Miter;
-  return pathsOf(inflatePathsD(ringsOf(paths), distance, join, EndType.Polygon, 2, PRECISION, CHORD_FOR_AREAS));
-}
+/** Corners sharper than this many distances out are cut off square. */
+const MITER = 2;
+
+/** Areas grown (distance > 0) or shrunk (distance < 0), mm, with sharp corners: never nearer than the distance, and few points. */
+export const offsetAreas = (paths: readonly Path[], distance: number): Path[] =>
+  pathsOf(inflatePathsD(ringsOf(paths), distance, JoinType.Miter, EndType.Polygon, MITER, PRECISION, CHORD_FOR_AREAS));
 
 export const uniteAreas = (paths: readonly Path[]): Path[] => pathsOf(unionD(ringsOf(paths), [], FillRule.NonZero, PRECISION));
 

@@ -61,7 +61,7 @@ export function flatten(path: Path, tolerance: number): Point[] {
     if (a.bulge === 0) return;
     const arc = arcOf(a, b);
     const widest = arc.radius <= tolerance ? Math.PI / 2 : 2 * Math.acos(1 - tolerance / arc.radius);
-    const steps = Math.max(2, Math.ceil(Math.abs(arc.sweep) / widest));
+    const steps = Math.ceil(Math.abs(arc.sweep) / widest);
     for (let i = 1; i < steps; i++) {
       const angle = arc.from + (arc.sweep * i) / steps;
       points.push({ x: arc.centre.x + arc.radius * Math.cos(angle), y: arc.centre.y + arc.radius * Math.sin(angle) });

@@ -7,7 +7,7 @@ export const SAME_POINT = 1e-6;
 export const CHORD_FOR_COLLISIONS = 0.15;
 
 /** mm. Chords in bleed and safe area: invisible in print. */
-export const CHORD_FOR_AREAS = 0.02;
+export const CHORD_FOR_AREAS = 0.03;
 
 /** mm. The folded inside may differ from the one asked by this much. */
 export const INSIDE_TOLERANCE = 0.05;

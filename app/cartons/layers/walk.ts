@@ -4,7 +4,7 @@ import type { Path, Point, Vertex } from "../geometry/outline";
 import { areaOf } from "../geometry/path";
 import { SAME_POINT, SHORTEST_LINE } from "../geometry/tolerance";
 import type { Blank } from "../blank/blank";
-import { nextVertex, type CreaseKind, type Panel, type Span } from "../blank/panel";
+import type { CreaseKind, Panel, Span } from "../blank/panel";
 
 interface HalfEdge {
   readonly panel: Panel;
@@ -59,40 +59,41 @@ export function walkBoundary(blank: Blank, takes: (panel: Panel) => boolean = ()
 
 function halfEdges(panels: readonly Panel[]): HalfEdge[] {
   const edges: HalfEdge[] = [];
-  const bySpan = new Map<string, number>();
-  const key = (panel: Panel, edge: number, from: number) => `${panel.index}/${edge}/${from}`;
+  const bySpan = new Map<Span, number>();
   for (const panel of panels) {
     const first = edges.length;
-    panel.outline.forEach((a, i) => {
-      const b = nextVertex(panel, i);
-      const start = apply(panel.flat, a);
-      const end = apply(panel.flat, b);
-      const spans = panel.spans.filter((s) => s.edge === i).sort((p, q) => p.from - q.from);
-      const length = Math.hypot(b.x - a.x, b.y - a.y);
-      const at = (s: number): Point => ({ x: start.x + ((end.x - start.x) * s) / length, y: start.y + ((end.y - start.y) * s) / length });
-      const push = (from: Point, to: Point, bulge: number, span: Span | null) => {
-        if (span) bySpan.set(key(panel, i, span.from), edges.length);
-        edges.push({ panel, from, to, bulge, span, next: edges.length + 1, twin: -1 });
-      };
-      if (spans.length === 0) {
-        push(start, end, a.bulge, null);
-        return;
+    const { outline, flat, spans } = panel;
+    const n = outline.length;
+    const start0 = apply(flat, outline[0]!);
+    let start = start0;
+    let nextSpan = 0;
+    for (let i = 0; i < n; i++) {
+      const end = i + 1 === n ? start0 : apply(flat, outline[i + 1]!);
+      const { bulge } = outline[i]!;
+      let reached: Point = start;
+      let length = 0;
+      let at = 0;
+      for (; nextSpan < spans.length && spans[nextSpan]!.edge === i; nextSpan++) {
+        const span = spans[nextSpan]!;
+        length ||= Math.hypot(end.x - start.x, end.y - start.y);
+        const from = pointAt(start, end, span.from / length);
+        const to = pointAt(start, end, span.to / length);
+        if (span.from - at > SAME_POINT) edges.push({ panel, from: reached, to: from, bulge: 0, span: null, next: edges.length + 1, twin: -1 });
+        bySpan.set(span, edges.length);
+        edges.push({ panel, from, to, bulge: 0, span, next: edges.length + 1, twin: -1 });
+        reached = to;
+        at = span.to;
       }
-      let reached = 0;
-      for (const span of spans) {
-        if (span.from - reached > SAME_POINT) push(at(reached), at(span.from), 0, null);
-        push(at(span.from), at(span.to), 0, span);
-        reached = span.to;
-      }
-      if (length - reached > SAME_POINT) push(at(reached), end, 0, null);
-    });
+      if (length === 0 || length - at > SAME_POINT) edges.push({ panel, from: reached, to: end, bulge, span: null, next: edges.length + 1, twin: -1 });
+      start = end;
+    }
     edges[edges.length - 1]!.next = first;
   }
-  for (const e of edges) {
-    if (e.span) e.twin = bySpan.get(key(e.span.twin.panel, e.span.twin.edge, e.span.twin.from)) ?? -1;
-  }
+  for (const [span, index] of bySpan) edges[index]!.twin = (span.twin && bySpan.get(span.twin)) ?? -1;
   return edges;
 }
+
+const pointAt = (a: Point, b: Point, f: number): Point => ({ x: a.x + (b.x - a.x) * f, y: a.y + (b.y - a.y) * f });
 
 function sharedLines(edges: readonly HalfEdge[]): SharedLine[] {
   const lines: SharedLine[] = [];

@@ -46,11 +46,14 @@ export function ledgerOf({ blank, board, size, asks, resolved }: LedgerInput): L
     const value = resolved.values[name];
     if (typeof value !== "number") continue;
     const isSet = resolved.isSet.has(name);
-    rows.push(entry({
+    const written = entry({
       id: `option:${name}`, name: ask.label, group: "option", value, unit: ask.kind === "angle" ? "deg" : ask.kind === "count" ? "count" : "mm",
-      source: isSet ? "asked" : "rule", rule: isSet ? null : resolved.showRule(name, plain), reason: ask.why, parameter: name, isSet,
+      source: isSet ? "asked" : "rule", reason: ask.why, parameter: name, isSet,
       terms: [{ name: ask.label, value, times: 1, source: isSet ? "asked" : "rule" }],
-    }));
+    });
+    // Written out only when it is read: forty sums a carton are not read while a figure is dragged.
+    if (!isSet) Object.defineProperty(written, "rule", { enumerable: true, get: () => resolved.showRule(name, plain) });
+    rows.push(written);
   }
   return rows;
 }

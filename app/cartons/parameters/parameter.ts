@@ -46,7 +46,7 @@ export const COMMON: Asks = {
     label: "Crease stops before an inner cut", kind: "length", default: "if(route < 1, if(micro, 1, 0.5), if(route < 2, 1, 0.3))", atLeast: 0, atMost: 3, group: "Making",
     why: "keeps a slit from tearing on along the crease", source: "common practice, no source",
   },
-  bleed: { label: "Bleed", kind: "length", default: 3, atLeast: 0, atMost: 20, group: "Print", why: "print runs past the cut by this much", source: "3 mm is usual in Europe, 3.18 mm (1/8 in) in the United States" },
+  bleed: { label: "Bleed", kind: "length", default: 3, atLeast: 0, atMost: 10, group: "Print", why: "print runs past the cut by this much", source: "3 mm is usual in Europe, 3.18 mm (1/8 in) in the United States" },
   safe: {
     label: "Safe area inside cuts and creases", kind: "length", default: "if(micro, 5, 3)", atLeast: 0, atMost: 30, group: "Print",
     why: "text nearer than this can be lost or fold over", source: "3 to 5 mm; 5 mm from crease and edge on corrugated board",
