@@ -1,30 +1,40 @@
 // For files only: a crease line stops short of the cut that it meets, so that rule does not stand on rule.
 import type { Path, Point, Vertex } from "../geometry/outline";
+import { eachEdge } from "../geometry/path";
 import { SAME_POINT } from "../geometry/tolerance";
 import type { Carton, LayerPath, Layers } from "../types";
 
-function distanceTo(p: Point, a: Point, b: Point): number {
-  const dx = b.x - a.x;
-  const dy = b.y - a.y;
-  const f = Math.max(0, Math.min(1, ((p.x - a.x) * dx + (p.y - a.y) * dy) / (dx * dx + dy * dy)));
-  return Math.hypot(p.x - a.x - f * dx, p.y - a.y - f * dy);
+function distanceTo(x: number, y: number, ax: number, ay: number, bx: number, by: number): number {
+  const dx = bx - ax;
+  const dy = by - ay;
+  const squared = dx * dx + dy * dy;
+  const f = squared === 0 ? 0 : Math.max(0, Math.min(1, ((x - ax) * dx + (y - ay) * dy) / squared));
+  return Math.hypot(x - ax - f * dx, y - ay - f * dy);
 }
 
-/** Does the point lie on one of the paths? Most edges are told apart by their boxes alone: this runs for each end of each crease. */
-function touches(p: Point, paths: readonly Path[]): boolean {
-  for (const { closed, vertices } of paths) {
-    const edges = closed ? vertices.length : vertices.length - 1;
-    for (let i = 0; i < edges; i++) {
-      const a = vertices[i]!;
-      if (Math.abs(p.x - a.x) < SAME_POINT && Math.abs(p.y - a.y) < SAME_POINT) return true;
-      if (a.bulge !== 0) continue;
-      const b = vertices[i + 1 === vertices.length ? 0 : i + 1]!;
-      if ((p.x < a.x - SAME_POINT && p.x < b.x - SAME_POINT) || (p.x > a.x + SAME_POINT && p.x > b.x + SAME_POINT)) continue;
-      if ((p.y < a.y - SAME_POINT && p.y < b.y - SAME_POINT) || (p.y > a.y + SAME_POINT && p.y > b.y + SAME_POINT)) continue;
-      if (distanceTo(p, a, b) < SAME_POINT) return true;
-    }
-    const last = vertices[vertices.length - 1];
-    if (!closed && last && Math.abs(p.x - last.x) < SAME_POINT && Math.abs(p.y - last.y) < SAME_POINT) return true;
+/** Ends of all edges, four figures an edge: this is looked through for each end of each crease. An arc counts by its ends alone. */
+function edgesOf(paths: readonly Path[]): Float64Array {
+  const figures: number[] = [];
+  for (const path of paths) {
+    eachEdge(path, (a, b) => {
+      if (a.bulge === 0) figures.push(a.x, a.y, b.x, b.y);
+      else figures.push(a.x, a.y, a.x, a.y, b.x, b.y, b.x, b.y);
+    });
+  }
+  return Float64Array.from(figures);
+}
+
+/** Does the point lie on one of the edges? Most are told apart by their boxes alone. */
+function touches(p: Point, edges: Float64Array): boolean {
+  const { x, y } = p;
+  for (let i = 0; i < edges.length; i += 4) {
+    const ax = edges[i]!;
+    const bx = edges[i + 2]!;
+    if ((x < ax - SAME_POINT && x < bx - SAME_POINT) || (x > ax + SAME_POINT && x > bx + SAME_POINT)) continue;
+    const ay = edges[i + 1]!;
+    const by = edges[i + 3]!;
+    if ((y < ay - SAME_POINT && y < by - SAME_POINT) || (y > ay + SAME_POINT && y > by + SAME_POINT)) continue;
+    if (distanceTo(x, y, ax, ay, bx, by) < SAME_POINT) return true;
   }
   return false;
 }
@@ -34,8 +44,8 @@ export function layersForCutting(carton: Carton): Layers {
   const outer = Number(carton.parameters["creaseInset"] ?? 0);
   const inner = Number(carton.parameters["creaseInsetInner"] ?? 0);
   if (outer === 0 && inner === 0) return carton.layers;
-  const outlines = carton.layers.cut.filter((c) => c.role === "outline").map((c) => c.path);
-  const inside = carton.layers.cut.filter((c) => c.role !== "outline").map((c) => c.path);
+  const outlines = edgesOf(carton.layers.cut.filter((c) => c.role === "outline").map((c) => c.path));
+  const inside = edgesOf(carton.layers.cut.filter((c) => c.role !== "outline").map((c) => c.path));
   const pull = (p: LayerPath): LayerPath => {
     const [a, b] = p.path.vertices;
     if (p.role !== "crease" || !a || !b) return p;
