@@ -7,6 +7,9 @@ export default [
     index("routes/desk.tsx"),
   ]),
 
+  // The Bench has a strip of its own
+  route("try", "routes/try.tsx"),
+
   // Service
   route("health", "routes/service/health.ts"),
 ] satisfies RouteConfig;
