@@ -1,6 +1,5 @@
 // From what was asked to a value for every option: defaults by rule, limits with the nearest value that works.
-import type { CompiledRule } from "../units/expression";
-import { compileRule } from "../units/expression";
+import { compileRule, type CompiledRule } from "../units/rule";
 import type { OptionValue, Refusal } from "../types";
 import type { Ask, Asks } from "./parameter";
 
