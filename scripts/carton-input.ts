@@ -5,7 +5,8 @@ import { BOARDS, findBoard } from "../app/cartons/boards/catalogue";
 import { listConstructions } from "../app/cartons/constructions/registry";
 import type { Side } from "../app/cartons/export/sheet-view";
 import type { Brief, ConstructionInfo, OptionValue, ParameterInfo, SizeBasis } from "../app/cartons/types";
-import { readLength } from "./carton-lengths";
+import { parseAngle, parseCount, parseLength, type Parsed } from "../app/cartons/units/expression";
+import { describeExpressionError } from "../app/cartons/units/expression-words";
 
 /** Bad input: its sentences go to standard error, and the exit status is 2. */
 export class BadInput extends Error {
@@ -96,15 +97,17 @@ function optionValue(info: ParameterInfo | undefined, name: string, text: string
     problems.push(`${info.label} is on or off: --set ${name}=on.`);
     return text;
   }
-  if (info.kind === "length") {
-    const length = readLength(text);
-    if (length.ok) return length.mm;
-    problems.push(`${info.label}: ${length.sentence}`);
-    return text;
-  }
-  const number = Number(text.replace(",", ".").replace(/°$/, ""));
-  if (!Number.isFinite(number) || text.trim() === "") problems.push(`${info.label} is a number, not “${text}”.`);
-  return number;
+  const read = info.kind === "length" ? lengthOf(text) : info.kind === "angle" ? parseAngle(text) : parseCount(text);
+  if (read.ok) return read.value;
+  problems.push(`${info.label}: ${describeExpressionError(read.error, { example: info.kind === "length" ? LENGTHS : info.kind === "angle" ? "8 or 8°" : "a whole number" })}`);
+  return text;
+}
+
+const LENGTHS = "43, 43mm or 1.69in";
+
+function lengthOf(text: string): Parsed<{ readonly value: number }> {
+  const read = parseLength(text, { unit: "mm" });
+  return read.ok ? { ok: true, value: read.mm } : read;
 }
 
 /** Throws BadInput with one sentence for each thing that is wrong. */
@@ -117,9 +120,9 @@ export function readBuild(args: readonly string[], today: string): BuildRequest 
   const length = (name: "L" | "W" | "D" | "caliper" | "room", label: string): number | null => {
     const text = last(name);
     if (text === undefined) return null;
-    const read = readLength(text);
-    if (read.ok) return read.mm;
-    problems.push(`${label}: ${read.sentence}`);
+    const read = lengthOf(text);
+    if (read.ok) return read.value;
+    problems.push(`${label}: ${describeExpressionError(read.error, { example: LENGTHS })}`);
     return null;
   };
   const [L, W, D] = [length("L", "Length"), length("W", "Width"), length("D", "Depth")];
