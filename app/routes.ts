@@ -10,6 +10,9 @@ export default [
   // The Bench has a strip of its own
   route("try", "routes/try.tsx"),
 
+  // Files
+  route("try/export/:format", "routes/try-export.ts"),
+
   // Service
   route("health", "routes/service/health.ts"),
 ] satisfies RouteConfig;
