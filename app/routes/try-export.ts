@@ -1,18 +1,18 @@
 import { askedCarton, readBrief } from "~/services/asked-carton.server";
-import { exportFile, fileResponse, readFormat, readView, refusedFile } from "~/services/export-file.server";
+import { exportFile, fileResponse, NO_SUCH_FILE, readView, refusedFile } from "~/services/export-file.server";
 import type { Route } from "./+types/try-export";
 
 /** Files of the Bench that needs no sign-in: everything that is drawn is in the address, and nothing is kept. */
 export async function loader({ request, params, url }: Route.LoaderArgs) {
-  const format = readFormat(params.format);
-  if (!format) return refusedFile(404, ["There is no such kind of file. There are pdf, tiled.pdf, svg and dxf."]);
+  const view = readView(params.format, url.searchParams);
+  if (!view) return refusedFile(404, [NO_SUCH_FILE]);
   const brief = readBrief(url.searchParams.get("brief") ?? "");
   if (!brief.ok) return refusedFile(brief.status, brief.sentences);
   const carton = askedCarton(brief.value);
   if (!carton.ok) return refusedFile(carton.status, carton.sentences);
   const title = (url.searchParams.get("title") ?? "").slice(0, 120).trim() || carton.value.construction.name;
   const file = await exportFile(carton.value, {
-    format, ...readView(url.searchParams), title, client: "", revision: "draft", date: new Date().toISOString().slice(0, 10), drawnBy: "",
+    ...view, title, client: "", revision: "draft", date: new Date().toISOString().slice(0, 10), drawnBy: "",
   });
   return fileResponse(request, file);
 }

@@ -9,6 +9,7 @@ import type { Carton } from "~/cartons/types";
 import { latoFonts } from "./fonts.server";
 
 export const exportFormats = ["pdf", "tiled.pdf", "svg", "dxf"] as const;
+export const NO_SUCH_FILE = "There is no such kind of file. There are pdf, tiled.pdf, svg and dxf.";
 export type ExportFormat = (typeof exportFormats)[number];
 
 const mediaTypes: Record<ExportFormat, string> = {
@@ -18,10 +19,7 @@ const mediaTypes: Record<ExportFormat, string> = {
   dxf: "image/vnd.dxf",
 };
 
-export interface ExportRequest {
-  readonly format: ExportFormat;
-  readonly side: Side;
-  readonly paper: Paper;
+export interface ExportRequest extends View {
   readonly title: string;
   readonly client: string;
   readonly revision: string;
@@ -36,14 +34,25 @@ export interface ExportFile {
   readonly name: string;
 }
 
-/** Null when the address asks for a kind of file that there is not. */
-export function readFormat(format: string | undefined): ExportFormat | null {
-  return exportFormats.find((f) => f === format) ?? null;
+export interface View {
+  readonly format: ExportFormat;
+  readonly side: Side;
+  readonly paper: Paper;
 }
 
-/** Side and paper of an address; anything else than the two words is the usual one. */
-export function readView(search: URLSearchParams): { side: Side; paper: Paper } {
-  return { side: search.get("side") === "print" ? "print" : "inside", paper: search.get("paper")?.toLowerCase() === "letter" ? "Letter" : "A4" };
+/**
+ * Kind of file, side and paper of an address. Null when there is no such kind. `tiles` makes of a PDF its sheets of that
+ * paper; anything else than the known words is the usual one: seen from the inside, on A4.
+ */
+export function readView(format: string | undefined, search: URLSearchParams): View | null {
+  const known = exportFormats.find((f) => f === format);
+  if (!known) return null;
+  const tiles = search.get("tiles");
+  return {
+    format: known === "pdf" && tiles !== null ? "tiled.pdf" : known,
+    side: search.get("side") === "print" ? "print" : "inside",
+    paper: (tiles ?? search.get("paper"))?.toLowerCase() === "letter" ? "Letter" : "A4",
+  };
 }
 
 export async function exportFile(carton: Carton, asked: ExportRequest): Promise<ExportFile> {
@@ -62,9 +71,11 @@ export async function exportFile(carton: Carton, asked: ExportRequest): Promise<
 export function fileName({ title, revision, side, format, paper }: Pick<ExportRequest, "title" | "revision" | "side" | "format" | "paper">): string {
   const extension = format === "tiled.pdf" ? "pdf" : format;
   const parts = [title, `revision ${revision}`, side === "inside" ? "inside" : "print side", ...(format === "tiled.pdf" ? [`tiled ${paper}`] : [])];
-  const safe = parts.join(", ").normalize("NFC").replace(/[\u0000-\u001f\u007f<>:"/\\|?*]+/g, " ").replace(/\s+/g, " ").replace(/^[. ]+|[. ]+$/g, "");
-  return `${[...safe].slice(0, 120).join("").trimEnd() || "carton"}.${extension}`;
+  return `${parts.map(safeName).filter((part) => part !== "").join(", ")}.${extension}`;
 }
+
+const safeName = (text: string): string =>
+  [...text.normalize("NFC").replace(/[\u0000-\u001f\u007f<>:"/\\|?*]+/g, " ").replace(/\s+/g, " ")].slice(0, 80).join("").replace(/^[. ]+|[. ]+$/g, "");
 
 /** RFC 6266 with the extended form of RFC 5987 for what is not plain ASCII. */
 export function contentDisposition(name: string): string {
