@@ -4,7 +4,7 @@ import { classNames } from "~/components/class-names";
 import { Icon } from "~/components/icon";
 import { refusalSentence } from "~/copy/refusals";
 import { useBench, refusalOf } from "./bench-context";
-import { type FigureKind, readFigure, showFigure, stepOf, withUnit } from "./lengths";
+import { expressionToKeep, type FigureKind, readFigure, showFigure, stepOf, withUnit } from "./lengths";
 import { MendButton } from "./mend-button";
 import { askedValue } from "./session";
 
@@ -132,7 +132,7 @@ function OpenFigure({ parameter, label, kind, look, value, className, onClose }:
   const before = useRef({ value, text: session.asked.typed[parameter] ?? showFigure(value, kind, units) });
   const [text, setText] = useState(before.current.text);
   const [isTried, setTried] = useState(false);
-  const reading = readFigure(text, kind, units, session);
+  const reading = readFigure(text, kind, units);
   const refusal = refusalOf(session, parameter);
   const isRefused = isTried && reading.ok && refusal !== undefined && Number(refusal.given) === reading.value;
 
@@ -149,7 +149,7 @@ function OpenFigure({ parameter, label, kind, look, value, className, onClose }:
   function commit(): boolean {
     setTried(true);
     if (!reading.ok) return false;
-    if (text.trim() !== before.current.text.trim() || reading.value !== before.current.value) bench.set(parameter, reading.value, text);
+    if (text.trim() !== before.current.text.trim() || reading.value !== before.current.value) bench.set(parameter, reading.value, expressionToKeep(text, kind, units));
     return true;
   }
 

@@ -51,7 +51,7 @@ export function Stage({ side, hidden, isCompact, findings, onScale, className }:
       role="group"
       aria-label="Drawing. Arrow keys move it, plus and minus zoom, 0 fits it, 1 is true size."
       {...controls.handlers}
-      className={classNames("relative touch-pan-y select-none overflow-hidden outline-offset-[-2px]", controls.own && "touch-none", className)}
+      className={classNames("touch-pan-y select-none overflow-hidden outline-offset-[-2px]", controls.own && "touch-none", className)}
     >
       {view && frame && <Drawn {...{ view, frame, side, hidden, isCompact, findings, units, lit: lit?.row ?? null, litPanels, carton }} />}
       <p className="sr-only">
