@@ -95,4 +95,4 @@ export const listText = (all: readonly ConstructionInfo[]): string =>
   ].join("\n")).join("\n\n") + "\n";
 
 export const boardsText = (all: readonly Board[]): string =>
-  all.map((b) => `${b.id.padEnd(18)}${b.name}, ${b.caliper} ± ${b.caliperTolerance} mm, ${b.grammage} g/m²${b.flute ? `, ${b.flute.letter} flute` : ""}`).join("\n") + "\n";
+  all.map((b) => `${b.id.padEnd(18)}${b.name}, ${short(b.caliper)} ± ${b.caliperTolerance.toFixed(3)} mm, ${b.grammage} g/m²${b.flute ? `, ${b.flute.letter} flute` : ""}`).join("\n") + "\n";

@@ -68,7 +68,7 @@ export function grainOf(carton: Carton, shapes: readonly Shape[], room: Room): G
     room.taken.push(boxOf(at));
     const half = length / 2;
     const line = angle === 0 ? { from: { x: at.x - half, y: at.y }, to: { x: at.x + half, y: at.y } } : { from: { x: at.x, y: at.y - half }, to: { x: at.x, y: at.y + half } };
-    arrows.push({ ...line, text: "grain", at, angle });
+    arrows.push({ ...line, text: carton.board.flute ? "flutes" : "grain", at, angle });
   }
   return arrows;
 }
