@@ -32,8 +32,11 @@ const sizes = (carton: Carton): string[] => carton.layers.cut.filter((p) => p.ro
 
 describe.each(cases)("PDF of $name", ({ carton }) => {
   describe.each(SIDES)("seen from the %s side", (side) => {
+    let made: Promise<Uint8Array> | null = null;
+    const once = async (): Promise<Uint8Array> => (made ??= pdfOf(carton, await options(side)));
+
     it("is sound, on one page, with trim round the blank and bleed round its bleed", async () => {
-      const bytes = await pdfOf(carton, await options(side));
+      const bytes = await once();
       withPdf(bytes, (file) => {
         expect(file.check()).toContain("No syntax or stream encoding errors found");
         const info = file.info("-box");
@@ -57,7 +60,7 @@ describe.each(cases)("PDF of $name", ({ carton }) => {
     });
 
     it("puts each layer in a group with its processing step, in its own overprinting separation", async () => {
-      const bytes = await pdfOf(carton, await options(side));
+      const bytes = await once();
       withPdf(bytes, (file) => {
         const names = LAYER_ORDER.filter((name) => carton.layers[name].length > 0);
         const steps = groupsIn(file).map((g) => g["/GTS_Metadata"] as Dict);
@@ -85,7 +88,7 @@ describe.each(cases)("PDF of $name", ({ carton }) => {
     });
 
     it("strokes each layer at its length and extent, arcs to a hundredth of a millimetre", async () => {
-      const bytes = await pdfOf(carton, await options(side));
+      const bytes = await once();
       withPdf(bytes, (file) => {
         const content = file.unpacked();
         const layers = layersSeen(carton, side);
@@ -110,7 +113,7 @@ describe.each(cases)("PDF of $name", ({ carton }) => {
     });
 
     it("prints the figures, the sentence of the check bar and the caution as text", async () => {
-      const bytes = await pdfOf(carton, await options(side));
+      const bytes = await once();
       withPdf(bytes, (file) => {
         const text = file.text("-layout").replace(/\s+/g, " ");
         for (const words of [
@@ -130,7 +133,7 @@ describe.each(cases)("PDF of $name", ({ carton }) => {
     });
 
     it("shows ink where lines and words must be (rendered by poppler)", async () => {
-      const bytes = await pdfOf(carton, await options(side));
+      const bytes = await once();
       withPdf(bytes, (file) => {
         const trim = boxOf(file.info("-box"), "TrimBox");
         const dpi = 100;
@@ -165,7 +168,7 @@ describe.each(cases)("PDF of $name", ({ carton }) => {
     });
 
     it("is the same file for the same input", async () => {
-      const [a, b] = [await pdfOf(carton, await options(side)), await pdfOf(carton, await options(side))];
+      const [a, b] = [await once(), await pdfOf(carton, await options(side))];
       expect(Buffer.compare(Buffer.from(a), Buffer.from(b))).toBe(0);
       const other = await pdfOf(carton, { ...(await options(side)), revision: "8" });
       expect(Buffer.compare(Buffer.from(a), Buffer.from(other))).not.toBe(0);
