@@ -5,6 +5,7 @@ export default [
   // Pages of text, under the common strip
   layout("routes/with-strip.tsx", [
     index("routes/desk.tsx"),
+    route("constructions", "routes/gallery.tsx"),
   ]),
 
   // The Bench has a strip of its own

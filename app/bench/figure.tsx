@@ -2,10 +2,10 @@
 import { type KeyboardEvent, type PointerEvent, useEffect, useId, useRef, useState } from "react";
 import { classNames } from "~/components/class-names";
 import { Icon } from "~/components/icon";
-import { refusalSentence } from "~/copy/refusals";
 import { useBench, refusalOf } from "./bench-context";
 import { expressionToKeep, type FigureKind, readFigure, showFigure, stepOf, withUnit } from "./lengths";
 import { MendButton } from "./mend-button";
+import { refusalWords } from "./refusal-words";
 import { askedValue } from "./session";
 
 export interface FigureProps {
@@ -84,7 +84,7 @@ export function Figure({ parameter, label, kind, look, row, className, vertical 
   if (isOpen) {
     return (
       <OpenFigure
-        {...{ parameter, label, kind, look, value, className }}
+        {...{ parameter, label, kind, look, value }}
         onClose={(how) => {
           setOpen(false);
           if (how === "key") requestAnimationFrame(() => button.current?.focus());
@@ -124,7 +124,7 @@ export function Figure({ parameter, label, kind, look, row, className, vertical 
   );
 }
 
-function OpenFigure({ parameter, label, kind, look, value, className, onClose }: Pick<FigureProps, "parameter" | "label" | "kind" | "look" | "className"> & { value: number; onClose: (how: "key" | "away") => void }) {
+function OpenFigure({ parameter, label, kind, look, value, onClose }: Pick<FigureProps, "parameter" | "label" | "kind" | "look"> & { value: number; onClose: (how: "key" | "away") => void }) {
   const bench = useBench();
   const { session, units } = bench;
   const id = useId();
@@ -166,10 +166,10 @@ function OpenFigure({ parameter, label, kind, look, value, className, onClose }:
   }
   const willBeRefused = () => reading.ok && bench.wouldRefuse(parameter, reading.value);
 
-  const sentence = isTried && !reading.ok ? reading.sentence : isRefused && refusal ? refusalSentence(refusal, session.asked.construction, (mm) => withUnit(mm, "length", units)) : null;
+  const sentence = isTried && !reading.ok ? reading.sentence : isRefused && refusal ? refusalWords(refusal, session.asked.construction, units) : null;
   return (
     <span
-      className={classNames("relative inline-block text-left", look === "drawing" ? "z-20" : "z-10", className)}
+      className={classNames("relative inline-block text-left", look === "drawing" ? "z-20" : "z-10")}
       onPointerDown={(event) => event.stopPropagation()}
       onBlur={(event) => {
         if (event.currentTarget.contains(event.relatedTarget)) return;
@@ -196,7 +196,7 @@ function OpenFigure({ parameter, label, kind, look, value, className, onClose }:
         />
         <span aria-live="polite" className="whitespace-nowrap pr-1 text-base text-ink-2">{words ? `= ${words}` : "= ?"}</span>
       </span>
-      <span id={`${id}-words`} className={classNames("absolute top-full z-20 block w-64 bg-paper px-1 pb-1 pt-1 text-small", look === "drawing" ? "left-0" : "right-0")}>
+      <span id={`${id}-words`} className={classNames("absolute top-full z-20 block w-max max-w-64 bg-paper px-1.5 pb-1 pt-1 text-small", look === "drawing" ? "left-0" : "right-0")}>
         {sentence ? (
           <span role="alert" className="flex items-start gap-1.5 text-stop">
             <Icon name="stop" size={14} className="mt-0.5" />

@@ -2,11 +2,11 @@
 import { Icon } from "~/components/icon";
 import { findingSentence } from "~/copy/findings";
 import { closesSentence } from "~/copy/fold-check";
-import { refusalSentence } from "~/copy/refusals";
 import type { Finding } from "~/cartons/types";
 import { useBench } from "./bench-context";
 import { showSize, withUnit } from "./lengths";
 import { MendButton, MendFinding } from "./mend-button";
+import { refusalWords } from "./refusal-words";
 
 export function FindingLine({ findings, onOpenCheck }: { findings: readonly Finding[]; onOpenCheck: () => void }) {
   const { session, units, typed } = useBench();
@@ -25,7 +25,7 @@ export function FindingLine({ findings, onOpenCheck }: { findings: readonly Find
           <>
             <Icon name="stop" className="mt-1 text-stop" />
             <span className="text-stop">
-              {refusalSentence(refusal, session.asked.construction, format)} <MendButton parameter={refusal.parameter} refusal={refusal} />
+              {refusalWords(refusal, session.asked.construction, units)} <MendButton parameter={refusal.parameter} refusal={refusal} />
             </span>
           </>
         ) : (

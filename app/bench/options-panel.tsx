@@ -87,7 +87,7 @@ function Control({ parameter, row, isSet }: { parameter: ParameterInfo; row: str
           aria-label={label}
           value={String(value)}
           onChange={(event) => set(name, event.target.value)}
-          className="min-h-8 max-w-48 appearance-none truncate border-b border-rule-2 bg-transparent pr-5 text-right hover:border-ink hover:text-live max-md:min-h-11"
+          className="min-h-8 max-w-48 appearance-none truncate [field-sizing:content] border-b border-rule-2 bg-transparent pr-5 text-right hover:border-ink hover:text-live max-md:min-h-11"
         >
           {oneOf?.map((o) => <option key={o.value} value={o.value}>{o.label}</option>)}
         </select>

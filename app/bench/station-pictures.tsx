@@ -1,6 +1,7 @@
 // Small true pictures above the lever's stations, from the pose that is checked.
 import { memo, useDeferredValue } from "react";
 import type { Carton } from "~/cartons/types";
+import { FoldedPicture } from "./folded-picture";
 import { FlatPicture } from "./stage/flat-picture";
 
 export function StationPictures({ carton, onPick }: { carton: Carton; onPick: (u: number) => void }) {
@@ -15,7 +16,7 @@ const Pictures = memo(function Pictures({ carton, onPick }: { carton: Carton; on
     <div className="pointer-events-none absolute inset-x-9 top-1.5 h-12">
       {Array.from({ length: steps.length + 1 }, (_, i) => (
         <span key={i} onClick={() => onPick(i)} className="pointer-events-auto absolute flex h-12 w-16 -translate-x-1/2 cursor-pointer items-center justify-center" style={{ left: `${(i / steps.length) * 100}%` }}>
-          {i === 0 && <FlatPicture carton={carton} width={64} height={46} />}
+          {i === 0 ? <FlatPicture carton={carton} width={64} height={46} /> : <FoldedPicture carton={carton} u={i} width={64} height={46} />}
         </span>
       ))}
     </div>

@@ -13,12 +13,12 @@ export function axisSentence(carton: Carton, axis: Axis, format: FormatLength): 
 
 /** "Board, creases and cuts move it by ± 0.8 mm at worst, ± 0.4 mm as a rule (root of squares)." */
 export function toleranceSentence(stack: ToleranceStack, format: FormatLength): string {
-  return `Board, creases and cuts can move it by ± ${format(stack.worstCase)} at worst, by ± ${format(stack.rootSumSquare)} as a rule (root of the sum of squares).`;
+  return `Board, creases and cuts can move it by ± ${format(hundredths(stack.worstCase))} at worst, by ± ${format(hundredths(stack.rootSumSquare))} as a rule (root of the sum of squares).`;
 }
 
 /** "4 × crease ± 0.2 mm, 2 × caliper ± 0.02 mm" */
 export function toleranceTerms(stack: ToleranceStack, format: FormatLength): string {
-  return stack.terms.map((term) => `${Math.abs(term.times) === 1 ? "" : `${Math.abs(term.times)} × `}${term.name} ± ${format(term.value)}`).join(", ");
+  return stack.terms.map((term) => `${Math.abs(term.times) === 1 ? "" : `${Math.abs(term.times)} × `}${term.name} ± ${format(term.value)}`).join(", ");
 }
 
 const mateVerbs: { readonly [Kind in MateReport["kind"]]: string } = {
@@ -32,7 +32,7 @@ export function mateSentence(mate: MateReport, labelOf: (panel: string) => strin
   const [a, b] = mate.panels;
   const gap = mate.kind === "glued" || mate.askedGap === 0 ? `${format(mate.measuredGap)} apart` : `${format(mate.measuredGap)} apart, ${format(mate.askedGap)} meant`;
   const area = mate.area > 0 ? `, over ${Math.round(mate.area)} mm²${mate.minArea > 0 ? ` (${Math.round(mate.minArea)} mm² is the least)` : ""}` : "";
-  return `${labelOf(a)} ${mateVerbs[mate.kind]} ${labelOf(b)}: ${gap}${area}.`;
+  return `${sentenceCase(labelOf(a))} ${mateVerbs[mate.kind]} ${labelOf(b)}: ${gap}${area}.`;
 }
 
 export function lockSentence(lock: LockReport, format: FormatLength): string {
@@ -47,6 +47,8 @@ export function collisionSentence(carton: Carton, labelOf: (panel: string) => st
   return deepest === 0 ? "Closed, no panel is where another is." : `Closed, no panel is where another is, beyond the ${format(deepest)} that the board gives where they press.`;
 }
 
+/** A tolerance to more than a hundredth says more than is known. */
+const hundredths = (mm: number) => Math.round(mm * 100) / 100;
 const sentenceCase = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** "Folds shut on 82 × 27 × 56 mm inside, as asked." */

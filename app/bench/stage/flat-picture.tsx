@@ -16,17 +16,25 @@ export interface FlatPictureProps {
   width: number;
   height: number;
   className?: string;
+  /** Pixels a millimetre, where several pictures share one scale; otherwise it fills its size. */
+  scale?: number;
 }
 
-export function FlatPicture({ carton, title, side = "inside", width, height, className }: FlatPictureProps) {
+const EDGE = 3;
+
+/** Pixels a millimetre at which the blank fills a picture. */
+export function flatScale(carton: Carton, width: number, height: number): number {
+  return Math.min((width - 2 * EDGE) / carton.blank.width, (height - 2 * EDGE) / carton.blank.height);
+}
+
+export function FlatPicture({ carton, title, side = "inside", width, height, className, scale = flatScale(carton, width, height) }: FlatPictureProps) {
   const box = blankBox(carton, side);
-  const [w, h] = [box.maxX - box.minX, box.maxY - box.minY];
-  const scale = Math.min((width - 6) / w, (height - 6) / h);
-  const edge = 3 / scale;
+  const [w, h] = [width / scale, height / scale];
+  const [left, top] = [(box.minX + box.maxX - w) / 2, -(box.minY + box.maxY + h) / 2];
   const isStamp = Math.min(width, height) < 90;
   return (
     <svg
-      viewBox={`${box.minX - edge} ${-box.maxY - edge} ${w + 2 * edge} ${h + 2 * edge}`}
+      viewBox={`${left} ${top} ${w} ${h}`}
       width={width}
       height={height}
       role={title ? "img" : undefined}
