@@ -12,7 +12,7 @@ import { FindingLine } from "./finding-line";
 import { FoldLever } from "./fold-lever";
 import { HelpDialog } from "./help-dialog";
 import { Leader } from "./leader";
-import { createLever, useLever } from "./lever";
+import { createLever, type Lever, useLever } from "./lever";
 import { type PanelName, SidePanel } from "./side-panel";
 import { withBasis, withConstruction, withDefault, withValue, type Session } from "./session";
 import { PhoneStrip } from "./phone-strip";
@@ -24,7 +24,7 @@ import { useBenchKeys } from "./use-bench-keys";
 import { useFoldMotion } from "./use-fold-motion";
 import { useNarrow } from "./use-narrow";
 import { builderFor, useSession } from "./use-session";
-import { isTrueSize, scaleWords } from "./view";
+import { isTrueSize, scaleWords, type View } from "./view";
 
 const FoldStage = lazy(() => import("./fold-stage"));
 
@@ -89,9 +89,11 @@ export function Bench({ opened, boards, constructions, name, canEdit, strip }: B
     setDrawerOpen(true);
   }, []);
   useBenchKeys({ actions, lever, motion, fold: session.carton.fold, zoom, flip: () => setSide((s) => (s === "inside" ? "print" : "inside")), openHelp: () => setHelpOpen(true), openPanel });
-  const onScale = useCallback((next: number, controls: PanZoom) => {
+  const view = useRef<View | null>(null);
+  const onView = useCallback((next: View, controls: PanZoom) => {
     zoom.current = controls;
-    setScale(next);
+    view.current = next;
+    setScale(next.scale);
   }, []);
   const toggleLayer = (layer: LayerName) => setHidden((before) => new Set(before.has(layer) ? [...before].filter((l) => l !== layer) : [...before, layer]));
 
@@ -104,12 +106,12 @@ export function Bench({ opened, boards, constructions, name, canEdit, strip }: B
           <div className="flex min-h-0 min-w-0 flex-1 flex-col">
             <div className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2 px-4 pb-2 pt-3 md:pl-8 md:pr-5">
               <FindingLine findings={findings} onOpenCheck={() => openPanel("check")} />
-              <StageTools {...{ side, setSide, scale, zoom, isCompact, isFlat: lever }} onOpenPanel={() => setDrawerOpen((is) => !is)} isDrawerOpen={isDrawerOpen} />
+              <StageTools {...{ side, setSide, scale, zoom, isCompact, lever }} onOpenPanel={() => setDrawerOpen((is) => !is)} isDrawerOpen={isDrawerOpen} />
               {!isCompact && <SizesLine carton={session.carton} units={units} className="w-full pl-7" />}
             </div>
             <div className="relative min-h-0 flex-1 max-md:h-[64vw] max-md:min-h-60 max-md:flex-none">
-              <StageOrFold lever={lever} fold={<FoldStage lever={lever} />}>
-                <Stage side={side} hidden={hidden} isCompact={isCompact} findings={findings} onScale={onScale} className="absolute inset-0" />
+              <StageOrFold lever={lever} fold={(onReady) => <FoldStage lever={lever} drawing={view} onReady={onReady} />}>
+                <Stage side={side} hidden={hidden} isCompact={isCompact} findings={findings} onView={onView} className="absolute inset-0" />
               </StageOrFold>
             </div>
             {!isCompact && <Legend carton={session.carton} hidden={hidden} onToggle={toggleLayer} units={units} className="px-8 pb-2 pt-1" />}
@@ -137,26 +139,29 @@ export function Bench({ opened, boards, constructions, name, canEdit, strip }: B
 }
 
 /** Flat, the stage is the drawing; with the lever off its stop it is the folding carton, fetched on first use. */
-function StageOrFold({ lever, fold, children }: { lever: ReturnType<typeof createLever>; fold: ReactNode; children: ReactNode }) {
+function StageOrFold({ lever, fold, children }: { lever: Lever; fold: (onReady: () => void) => ReactNode; children: ReactNode }) {
   const isFolding = useLever(lever) > 0;
   const [wasTouched, setTouched] = useState(false);
+  const [isReady, setReady] = useState(false);
+  const onReady = useCallback(() => setReady(true), []);
   useEffect(() => {
     if (isFolding) setTouched(true);
   }, [isFolding]);
   return (
     <>
-      <div className={isFolding ? "invisible" : undefined}>{children}</div>
+      <div className={isFolding && isReady ? "invisible" : undefined}>{children}</div>
       {(isFolding || wasTouched) && (
-        <div className={classNames("absolute inset-0", !isFolding && "invisible")}>
-          <Suspense fallback={<p className="flex h-full items-center justify-center text-ink-2" role="status">Fetching the folding stage …</p>}>{fold}</Suspense>
+        <div className={classNames("absolute inset-0", !(isFolding && isReady) && "invisible")}>
+          <Suspense fallback={null}>{fold(onReady)}</Suspense>
         </div>
       )}
+      {isFolding && !isReady && <p role="status" className="absolute bottom-2 left-8 bg-paper text-small text-ink-2">Fetching the folding stage …</p>}
     </>
   );
 }
 
-function StageTools({ side, setSide, scale, zoom, isCompact, isFlat, onOpenPanel, isDrawerOpen }: { side: Side; setSide: (side: Side) => void; scale: number | null; zoom: { current: PanZoom | null }; isCompact: boolean; isFlat: ReturnType<typeof createLever>; onOpenPanel: () => void; isDrawerOpen: boolean }) {
-  const isFolding = useLever(isFlat) > 0;
+function StageTools({ side, setSide, scale, zoom, isCompact, lever, onOpenPanel, isDrawerOpen }: { side: Side; setSide: (side: Side) => void; scale: number | null; zoom: { current: PanZoom | null }; isCompact: boolean; lever: Lever; onOpenPanel: () => void; isDrawerOpen: boolean }) {
+  const isFolding = useLever(lever) > 0;
   const width = useNarrow();
   const drawer = width === "drawer" && (
     <Button size="small" onClick={onOpenPanel} aria-expanded={isDrawerOpen}>Ledger</Button>

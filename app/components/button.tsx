@@ -9,8 +9,8 @@ export type ButtonSize = "normal" | "small";
 const looks: Record<ButtonLook, string> = {
   main: "border border-ink bg-ink text-paper font-bold hover:bg-ink-2 hover:border-ink-2 aria-disabled:bg-ink-3 aria-disabled:border-ink-3",
   outline: "border border-ink bg-transparent text-ink font-bold hover:bg-desk aria-disabled:border-rule-2 aria-disabled:text-ink-3",
-  plain: "border-b border-rule-2 text-ink hover:border-ink hover:text-live aria-disabled:text-ink-3",
-  mend: "border-b border-live-line text-live font-bold hover:bg-wash",
+  plain: "underline decoration-rule-2 decoration-1 underline-offset-4 text-ink hover:decoration-ink hover:text-live aria-disabled:text-ink-3",
+  mend: "underline decoration-live-line decoration-1 underline-offset-4 text-live font-bold hover:bg-wash",
 };
 const boxes: Record<ButtonSize, string> = {
   normal: "min-h-10 px-4 py-2 text-base max-md:min-h-11",
@@ -72,7 +72,7 @@ export function FileLink({ href, children, look = "plain", className, ...rest }:
 }
 
 export function Link({ className, ...rest }: LinkProps) {
-  return <RouterLink {...rest} className={classNames("border-b border-rule-2 hover:border-ink hover:text-live", className)} />;
+  return <RouterLink {...rest} className={classNames("underline decoration-rule-2 decoration-1 underline-offset-4 hover:decoration-ink hover:text-live", className)} />;
 }
 
 /** A few words of which one is chosen at once: "mm | in". */

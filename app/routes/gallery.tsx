@@ -92,7 +92,7 @@ function PlateOf({ construction, carton, oneScale, contents, units }: { construc
         <span className="text-small text-ink-2" title={construction.codes.map((c) => c.source).join(" ")}>
           {construction.codes.length === 0 ? "no code" : construction.codes.map((c) => `${c.system} ${c.code}`).join(", ")}
         </span>
-        <span className="ml-auto text-small text-ink-3">flat {scaleWords(scale)}</span>
+        <span className="ml-auto text-small text-ink-3 max-md:hidden">flat {scaleWords(scale)}</span>
       </div>
       <p className="pt-1 text-ink-2">{construction.summary}</p>
       <p className="pt-1 text-small text-ink-3">
@@ -124,7 +124,7 @@ function Filters({ search }: { search: URLSearchParams }) {
           {choices.map(([value, label]) => {
             const isChosen = (search.get(name) ?? "") === value;
             return (
-              <ButtonLink key={value} to={to(name, value)} preventScrollReset look="plain" aria-current={isChosen ? "true" : undefined} className={isChosen ? "border-b-2! border-ink! font-bold" : "border-transparent! text-ink-2"}>
+              <ButtonLink key={value} to={to(name, value)} preventScrollReset look="plain" aria-current={isChosen ? "true" : undefined} className={isChosen ? "decoration-2! decoration-ink! font-bold" : "no-underline! text-ink-2"}>
                 {label}
               </ButtonLink>
             );

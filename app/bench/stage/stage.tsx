@@ -21,14 +21,15 @@ export interface StageProps {
   /** Phone: only what was asked and the blank's own size, no rulers, no names. */
   isCompact: boolean;
   findings: readonly Finding[];
-  onScale: (scale: number, controls: PanZoom) => void;
+  /** Where the drawing lies now: told on every change of it. */
+  onView: (view: View, controls: PanZoom) => void;
   className?: string;
 }
 
 const WIDE: Insets = { left: 34, right: 24, top: 28, bottom: 20 };
 const COMPACT: Insets = { left: 10, right: 10, top: 10, bottom: 10 };
 
-export function Stage({ side, hidden, isCompact, findings, onScale, className }: StageProps) {
+export function Stage({ side, hidden, isCompact, findings, onView, className }: StageProps) {
   const { session, units, lit, litPanels } = useBench();
   const { carton } = session;
   const ref = useRef<HTMLDivElement>(null);
@@ -40,9 +41,9 @@ export function Stage({ side, hidden, isCompact, findings, onScale, className }:
   latest.current = view;
 
   useEffect(() => {
-    if (view) onScale(view.scale, controls);
+    if (view) onView(view, controls);
     // The controls are made anew on each render and do the same.
-  }, [view?.scale, controls.own === null]);
+  }, [view, onView]);
 
   return (
     <div
