@@ -5,13 +5,14 @@ import { DoubleSide, Group, Matrix4, Mesh, MeshBasicMaterial, MeshLambertMateria
 import { LineMaterial } from "three/examples/jsm/lines/LineMaterial.js";
 import { LineSegments2 } from "three/examples/jsm/lines/LineSegments2.js";
 import { LineSegmentsGeometry } from "three/examples/jsm/lines/LineSegmentsGeometry.js";
-import { poseAt } from "~/cartons/fold/pose";
+import { poseAt, progressOf } from "~/cartons/fold/pose";
+import { panelRuns } from "~/cartons/export/picture/faces";
 import { transform, type Mat, type Vec3 } from "~/cartons/geometry/space";
 import type { Carton } from "~/cartons/types";
 import { lookAt, type Turn } from "../camera";
 import type { View } from "../view";
 import type { Colours } from "./colours";
-import { outlineLines, panelGeometry } from "./panel-geometry";
+import { creaseLine, outlineLines, panelGeometry } from "./panel-geometry";
 
 interface Props {
   readonly carton: Carton;
@@ -25,6 +26,11 @@ interface Props {
 }
 
 const OUTLINE_PX = 1.5;
+const CREASE_PX = 1.2;
+/** px: dash and gap of a crease that is not bent yet, as on the drawing. */
+const DASH = [13, 5] as const;
+/** Radians: from here on a crease is drawn as the carton's edge. */
+const BENT = 0.26;
 /** Light from the upper left in front, as in the pictures. */
 const FALL: Vec3 = [-0.55, 1, 0.7];
 
@@ -38,36 +44,45 @@ export function FoldingCarton({ carton, u, turn, drawing, colours, lit, seeThrou
     glass: new MeshLambertMaterial({ color: colours.print, transparent: true, opacity: 0.12, depthWrite: false }),
     cast: new MeshBasicMaterial({ color: colours.cast, depthWrite: false }),
     line: new LineMaterial({ color: colours.ink, linewidth: OUTLINE_PX }),
+    bent: new LineMaterial({ color: colours.ink, linewidth: CREASE_PX }),
+    crease: new LineMaterial({ color: colours.crease, linewidth: CREASE_PX, dashed: true }),
   }), [colours]);
-  useEffect(() => () => { [...paints.faces, paints.lit, paints.glass, paints.cast, paints.line].forEach((m) => m.dispose()); }, [paints]);
+  useEffect(() => () => { [...paints.faces, paints.lit, paints.glass, paints.cast, paints.line, paints.bent, paints.crease].forEach((m) => m.dispose()); }, [paints]);
 
-  const solids = useMemo(() => carton.fold.panels.map((panel) => {
+  const solids = useMemo(() => panelRuns(carton).map((runs, i) => {
+    const panel = carton.fold.panels[i]!;
     const geometry = panelGeometry(panel);
     const mesh = new Mesh(geometry);
     mesh.name = panel.name;
-    const lines = new LineSegments2(new LineSegmentsGeometry().setPositions(outlineLines(panel)));
+    const lines = new LineSegments2(new LineSegmentsGeometry().setPositions(outlineLines(runs, panel.thickness)));
+    const crease = new LineSegments2(new LineSegmentsGeometry().setPositions(creaseLine(runs, panel.thickness)));
+    crease.computeLineDistances();
+    crease.visible = carton.fold.hinges.some((h) => h.child === i);
     const group = new Group();
-    group.add(mesh, lines);
+    group.add(mesh, lines, crease);
     group.matrixAutoUpdate = false;
     const shadow = new Mesh(geometry);
     shadow.matrixAutoUpdate = false;
     shadow.renderOrder = -1;
     shadow.raycast = () => {};
-    return { panel, group, mesh, lines, shadow };
+    return { panel, group, mesh, lines, crease, shadow, hinge: carton.fold.hinges.find((h) => h.child === i) };
   }), [carton]);
   useEffect(() => () => {
     for (const s of solids) {
       s.mesh.geometry.dispose();
       s.lines.geometry.dispose();
+      s.crease.geometry.dispose();
     }
   }, [solids]);
 
   useLayoutEffect(() => {
     const pose = poseAt(carton.fold, u);
     const look = lookAt(carton.fold, pose, u, turn, drawing, size);
-    paints.line.resolution.set(size.width, size.height);
+    for (const line of [paints.line, paints.bent, paints.crease]) line.resolution.set(size.width, size.height);
+    paints.crease.dashSize = DASH[0] / look.scale;
+    paints.crease.gapSize = DASH[1] / look.scale;
     const cast = shadowMatrix(carton, pose);
-    solids.forEach(({ panel, group, mesh, lines, shadow }, i) => {
+    solids.forEach(({ panel, group, mesh, lines, crease, hinge, shadow }, i) => {
       const m = pose[i]!;
       group.matrix.copy(matrixOf(m));
       group.matrixWorldNeedsUpdate = true;
@@ -75,6 +90,7 @@ export function FoldingCarton({ carton, u, turn, drawing, colours, lit, seeThrou
       const isGlass = seeThrough && u > 0 && facesViewer;
       mesh.material = lit.has(panel.name) ? [paints.lit, paints.lit, paints.faces[2]!] : isGlass ? [paints.glass, paints.glass, paints.glass] : paints.faces;
       lines.material = paints.line;
+      crease.material = hinge && Math.abs(hinge.angle) * progressOf(hinge.step, u) > BENT ? paints.bent : paints.crease;
       shadow.visible = u > 0.001;
       shadow.matrix.copy(cast).multiply(group.matrix);
       shadow.matrixWorldNeedsUpdate = true;

@@ -2,12 +2,15 @@
 import { BufferGeometry, Float32BufferAttribute } from "three";
 import { flatten } from "~/cartons/geometry/path";
 import type { Point } from "~/cartons/geometry/outline";
+import type { Run } from "~/cartons/export/picture/faces";
 import type { FoldPanel } from "~/cartons/types";
 
 /** mm. Chords of rounded corners on screen. */
 const CHORD = 0.05;
 /** cos 25°: a corner sharper than this has an edge through the board's thickness. */
 const SHARP = 0.9;
+/** mm: nearer than this to its own y = 0 a run lies on the panel's crease. */
+const ON_CREASE = 0.01;
 
 export const PRINT = 0;
 export const INSIDE = 1;
@@ -52,16 +55,24 @@ export function panelGeometry(panel: FoldPanel): BufferGeometry {
 
 const rings = (panel: FoldPanel): Point[][] => [flatten(panel.outline, CHORD), ...panel.holes.map((h) => flatten(h, CHORD))];
 
-/** Both faces' outlines and the edges through the board at sharp corners, as x, y, z pairs. */
-export function outlineLines(panel: FoldPanel): number[] {
-  const half = panel.thickness / 2;
+/** Lines of both faces along free edges, and the edges through the board at sharp corners, as x, y, z pairs. */
+export function outlineLines(runs: readonly Run[], thickness: number): number[] {
+  const half = thickness / 2;
   const lines: number[] = [];
-  for (const ring of rings(panel)) ring.forEach((a, i) => {
-    const b = ring[(i + 1) % ring.length]!;
-    const before = ring[(i - 1 + ring.length) % ring.length]!;
+  runs.forEach((run, i) => {
+    if (run.kind !== "outline") return;
+    const { a, b } = run;
     for (const z of [-half, half]) lines.push(a.x, a.y, z, b.x, b.y, z);
-    const [ux, uy, vx, vy] = [a.x - before.x, a.y - before.y, b.x - a.x, b.y - a.y];
+    const before = runs[(i - 1 + runs.length) % runs.length]!;
+    const [ux, uy, vx, vy] = [before.b.x - before.a.x, before.b.y - before.a.y, b.x - a.x, b.y - a.y];
     if (ux * vx + uy * vy < SHARP * Math.hypot(ux, uy) * Math.hypot(vx, vy)) lines.push(a.x, a.y, -half, a.x, a.y, half);
   });
   return lines;
+}
+
+/** The crease a panel hangs on, on both faces; empty for a root. */
+export function creaseLine(runs: readonly Run[], thickness: number): number[] {
+  const half = thickness / 2;
+  return runs.filter((r) => r.kind !== "outline" && Math.abs(r.a.y) < ON_CREASE && Math.abs(r.b.y) < ON_CREASE)
+    .flatMap(({ a, b }) => [-half, half].flatMap((z) => [a.x, a.y, z, b.x, b.y, z]));
 }

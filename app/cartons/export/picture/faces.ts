@@ -19,7 +19,7 @@ export interface Face {
   readonly twoSided: boolean;
 }
 
-interface Run { readonly a: Point; readonly b: Point; readonly kind: EdgeKind }
+export interface Run { readonly a: Point; readonly b: Point; readonly kind: EdgeKind }
 
 /** Chords a quarter turn of an arc is drawn with. */
 const CHORDS = 4;
@@ -85,14 +85,27 @@ function follows(p: Point, q: Point, { a, b }: Run): boolean {
   return off < SAME_ARC && on > -SAME_ARC && on < length + SAME_ARC && Math.abs((q.x - p.x) * ux + (q.y - p.y) * uy) > 0.85 * own;
 }
 
+/** Each panel's outline and holes in its own frame, cut into what is free and what is creased. Creases count as lying flat. */
+export function panelRuns(carton: Carton): Run[][] {
+  const creases = creaseLines(carton).map((c) => ({ ...c, bent: false }));
+  return carton.fold.panels.map((panel, i) => {
+    const drawn = carton.panels[i]!;
+    const own = creases.filter((c) => c.panels.includes(panel.name));
+    return [runsOf(panel.outline, drawn.outline, own), ...panel.holes.map((h, k) => runsOf(h, drawn.holes[k]!, []))].flat();
+  });
+}
+
+const creaseLines = (carton: Carton) => [...carton.layers.crease, ...carton.layers.reverseCrease].filter((c) => c.role === "crease")
+  .map((c) => ({ panels: c.panels, a: c.path.vertices[0]!, b: c.path.vertices[1]! }));
+
 /** All faces of the carton in a pose. `thin` leaves thickness out: for pictures of stamp size. */
 export function facesOf(carton: Carton, pose: Pose, thin: boolean): Face[] {
   const faces: Face[] = [];
   const parentOf = new Map(carton.fold.hinges.map((h) => [h.child, h.parent]));
-  const creases = [...carton.layers.crease, ...carton.layers.reverseCrease].filter((c) => c.role === "crease").map((c) => {
+  const creases = creaseLines(carton).map((c) => {
     const [p, q] = c.panels.map((name) => pose[carton.fold.panels.findIndex((panel) => panel.name === name)]!) as [Mat, Mat];
     const cross = [p[6] * q[10] - p[10] * q[6], p[10] * q[2] - p[2] * q[10], p[2] * q[6] - p[6] * q[2]] as const;
-    return { panels: c.panels, a: c.path.vertices[0]!, b: c.path.vertices[1]!, bent: Math.hypot(...cross) > FLAT_FOLD };
+    return { ...c, bent: Math.hypot(...cross) > FLAT_FOLD };
   });
   carton.fold.panels.forEach((panel, i) => {
     const m = pose[i]!;
