@@ -21,7 +21,7 @@ export function checkMates(closed: Closed): MatesReport {
     const b = planeOf(closed, mate.b);
     const parallel = isParallel(a.normal, b.normal, PARALLEL) && dot(a.normal, b.normal) < 0;
     const measuredGap = dot(subtract(b.at, a.at), a.normal);
-    const { area, width } = sharedPatch(closed, mate.a.panel, mate.b.panel);
+    const { area, width } = sharedPatch(closed, mate.a.panel, mate.b.panel, mate.kind === "glued");
     const panels = [mate.a.panel, mate.b.panel] as const;
     const finding = (code: string, measured: number, required: number) =>
       findings.push({ code, severity: "error", panels, at: null, measured, required, facts: { a: panels[0], b: panels[1], kind: mate.kind }, mend: null });
@@ -38,7 +38,7 @@ export function checkMates(closed: Closed): MatesReport {
 }
 
 /** Where two parallel panels lie over one another, seen along their normal: area, mm², and the widest piece's least width, mm. */
-function sharedPatch(closed: Closed, nameA: string, nameB: string): { area: number; width: number } {
+function sharedPatch(closed: Closed, nameA: string, nameB: string, withWidth: boolean): { area: number; width: number } {
   const a = closed.plates[closed.blank.byName.get(nameA)!.index]!;
   const b = closed.plates[closed.blank.byName.get(nameB)!.index]!;
   const m = multiply(a.inverse, b.matrix);
@@ -50,5 +50,5 @@ function sharedPatch(closed: Closed, nameA: string, nameB: string): { area: numb
     return polygonArea(seen) < 0 ? seen.reverse() : seen;
   });
   const { area, pieces } = overlapOf(a.pieces, flat);
-  return { area, width: pieces.reduce((widest, p) => Math.max(widest, leastWidth(p)), 0) };
+  return { area, width: withWidth ? pieces.reduce((widest, p) => Math.max(widest, leastWidth(p)), 0) : 0 };
 }

@@ -6,8 +6,11 @@ export const SAME_POINT = 1e-6;
 /** mm. Chords may leave an arc by this much where plates are tested against each other; real corners are coarser. */
 export const CHORD_FOR_COLLISIONS = 0.15;
 
-/** mm. Chords in bleed and safe area: invisible in print. */
+/** mm. Chords in the bleed: invisible in print. */
 export const CHORD_FOR_AREAS = 0.03;
+
+/** mm. Chords in areas drawn in from the edge (safe, glue): they guide an eye and a glue nozzle, no knife. */
+export const CHORD_FOR_INSETS = 0.1;
 
 /** mm. The folded inside may differ from the one asked by this much. */
 export const INSIDE_TOLERANCE = 0.05;

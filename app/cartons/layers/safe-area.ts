@@ -2,7 +2,7 @@
 import { applyToPath } from "../geometry/isometry";
 import type { Blank } from "../blank/blank";
 import type { LayerPath } from "../types";
-import { insetOf } from "./glue-areas";
+import { insetOf } from "./inset";
 
 export function safeAreas(blank: Blank, by: number): LayerPath[] {
   if (by <= 0) return [];
