@@ -12,7 +12,7 @@ import { ACROSS, type Tube } from "./four-panel-tube";
 const PRACTICE = "engineering practice, no published source";
 
 /** Options of both ends, as rules: `room` is what a tongue may take of D, `besideGlue` how far its end stays from the side it has the glue flap on. */
-export const tuckAsks = (room: string, besideGlue: string): Asks => tuckOptions(room, `2.3 + shoulderShort + a + ${besideGlue}`);
+export const tuckAsks = (room: string, besideGlue: string): Asks => tuckOptions(room, `2.6 + shoulderShort + a + ${besideGlue}`);
 
 const tuckOptions = (room: string, leastSlit: string): Asks => ({
   tuck: {
