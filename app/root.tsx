@@ -1,5 +1,5 @@
 import type { ReactNode } from "react";
-import { Links, Meta, Outlet, Scripts, ScrollRestoration, useRouteLoaderData } from "react-router";
+import { Links, Meta, Outlet, Scripts, ScrollRestoration, type ShouldRevalidateFunctionArgs, useRouteLoaderData } from "react-router";
 import type { Route } from "./+types/root";
 import type { Viewer } from "./auth/viewer";
 import { ErrorPage } from "./components/error-page";
@@ -17,6 +17,12 @@ export const links: Route.LinksFunction = () => [
 
 export function loader({ request }: Route.LoaderArgs) {
   return { preferences: readPreferences(request.headers.get("Cookie")), viewer: null as Viewer | null };
+}
+
+/** After a form that could not be sent or kept there is nothing new to ask for; asking would put an error page over what was typed. */
+export function shouldRevalidate({ actionResult, defaultShouldRevalidate }: ShouldRevalidateFunctionArgs): boolean {
+  const isLost = typeof actionResult === "object" && actionResult !== null && ("offline" in actionResult || "problem" in actionResult);
+  return !isLost && defaultShouldRevalidate;
 }
 
 export function Layout({ children }: { children: ReactNode }) {

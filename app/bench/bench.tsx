@@ -109,7 +109,7 @@ export function Bench({ opened, boards, constructions, name, canEdit, strip }: B
               <StageTools {...{ side, setSide, scale, zoom, isCompact, lever }} onOpenPanel={() => setDrawerOpen((is) => !is)} isDrawerOpen={isDrawerOpen} />
               {!isCompact && <SizesLine carton={session.carton} units={units} className="w-full pl-7" />}
             </div>
-            <div className="relative min-h-0 flex-1 max-md:h-[64vw] max-md:min-h-60 max-md:flex-none">
+            <div className="relative min-h-0 flex-1 max-md:h-[72vw] max-md:min-h-64 max-md:flex-none">
               <StageOrFold lever={lever} fold={(onReady) => <FoldStage lever={lever} drawing={view} onReady={onReady} />}>
                 <Stage side={side} hidden={hidden} isCompact={isCompact} findings={findings} onView={onView} className="absolute inset-0" />
               </StageOrFold>

@@ -143,7 +143,8 @@ function OpenFigure({ parameter, label, kind, look, value, onClose }: Pick<Figur
     // Once, when it opens.
   }, []);
   const words = reading.ok ? withUnit(reading.value, kind, units) : null;
-  useEffect(() => bench.typing(words ?? ""), [words]);
+  // Tried and refused, the sentence at the top says so; until then it says what is being checked.
+  useEffect(() => bench.typing(isRefused ? null : words ?? ""), [words, isRefused]);
 
   /** True when the field may close. */
   function commit(): boolean {
@@ -169,7 +170,7 @@ function OpenFigure({ parameter, label, kind, look, value, onClose }: Pick<Figur
   const sentence = isTried && !reading.ok ? reading.sentence : isRefused && refusal ? refusalWords(refusal, session.asked.construction, units) : null;
   return (
     <span
-      className={classNames("relative inline-block text-left", look === "drawing" ? "z-20" : "z-10")}
+      className={classNames("text-left", look === "strip" ? "absolute inset-x-3 bottom-1 z-10 block" : classNames("relative inline-block", look === "drawing" ? "z-20" : "z-10"))}
       onPointerDown={(event) => event.stopPropagation()}
       onBlur={(event) => {
         if (event.currentTarget.contains(event.relatedTarget)) return;
@@ -192,11 +193,12 @@ function OpenFigure({ parameter, label, kind, look, value, onClose }: Pick<Figur
             setTried(false);
           }}
           onKeyDown={onKeyDown}
-          className="w-24 bg-transparent text-figure font-bold outline-none"
+          className={classNames("bg-transparent text-figure font-bold outline-none", look === "strip" ? "min-w-0 flex-1" : "w-24")}
         />
         <span aria-live="polite" className="whitespace-nowrap pr-1 text-base text-ink-2">{words ? `= ${words}` : "= ?"}</span>
       </span>
-      <span id={`${id}-words`} className={classNames("absolute top-full z-20 block w-max max-w-64 bg-paper px-1.5 pb-1 pt-1 text-small", look === "drawing" ? "left-0" : "right-0")}>
+      {/* On a phone the sentence of a refusal stands under the strip already. */}
+      <span id={`${id}-words`} className={classNames("absolute top-full z-20 block bg-paper px-1.5 pb-1 pt-1 text-small", look === "strip" ? "inset-x-0" : "w-max max-w-64", look === "drawing" && "left-0", look === "row" && "right-0", look === "strip" && isRefused && "hidden")}>
         {sentence ? (
           <span role="alert" className="flex items-start gap-1.5 text-stop">
             <Icon name="stop" size={14} className="mt-0.5" />

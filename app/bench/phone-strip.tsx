@@ -20,16 +20,16 @@ export function PhoneStrip({ scale, legend }: { scale: number | null; legend: Re
   return (
     <div>
       <div className="flex items-center gap-4 px-4 py-2">
-        <span className="text-small text-ink-2">{scale === null ? "" : scaleWords(scale)}</span>
+        <span className="whitespace-nowrap text-small text-ink-2">{scale === null ? "" : scaleWords(scale)}</span>
         <details className="group min-w-0 flex-1">
           <summary className="inline-flex min-h-11 cursor-pointer list-none items-center text-small underline decoration-rule-2 underline-offset-4 [&::-webkit-details-marker]:hidden">Layers and legend</summary>
           {legend}
         </details>
         <Switch label="Units" value={units} onChange={setUnits} choices={[{ value: "mm", label: "mm" }, { value: "in", label: "in" }]} className="self-start" />
       </div>
-      <div className="grid grid-cols-3 border-y-2 border-ink">
+      <div className="relative grid grid-cols-3 border-y-2 border-ink">
         {axes.map((axis) => (
-          <div key={axis} className={classNames("relative border-r border-rule px-4 py-1.5 last:border-r-0 focus-within:bg-wash", lit?.row === `asked:${axis}` && "bg-wash")}>
+          <div key={axis} className={classNames("border-r border-rule px-4 py-1.5 last:border-r-0 focus-within:bg-wash", lit?.row === `asked:${axis}` && "bg-wash")}>
             <p className="text-label text-ink-2">{axisWords[axis]}</p>
             <Figure parameter={axis} label={axisWords[axis]} kind="length" look="strip" row={`asked:${axis}`} className="no-underline!" />
           </div>

@@ -30,7 +30,7 @@ export function ErrorPage({ error }: { error: unknown }) {
   return (
     <Page>
       <div className="max-w-xl pt-8">
-        <h1 className="text-desk font-black">{title}</h1>
+        <h1 className="text-h0 font-black">{title}</h1>
         <p className="pt-3 text-[17px] leading-7 text-ink-2">{sentence}</p>
         {id && <p className="pt-2 text-small text-ink-2">Number {id}</p>}
         <div className="flex flex-wrap items-center gap-4 pt-5">

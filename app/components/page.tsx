@@ -16,7 +16,7 @@ export function PageHeader({ title, aside, children, large }: { title: ReactNode
   return (
     <header className="flex flex-wrap items-end justify-between gap-x-6 gap-y-3 border-b-2 border-ink pb-4">
       <div className="flex min-w-0 flex-wrap items-baseline gap-x-4 gap-y-1">
-        <h1 className={classNames("font-black", large ? "text-desk" : "text-h1")}>{title}</h1>
+        <h1 className={classNames("font-black", large ? "text-h0" : "text-h1")}>{title}</h1>
         {aside && <p className="text-base text-ink-2">{aside}</p>}
       </div>
       {children && <div className="flex flex-wrap items-center gap-3">{children}</div>}
@@ -44,7 +44,7 @@ export function EmptyState({ title, children, action, picture, level = 2 }: { ti
   return (
     <div className="grid items-start gap-8 py-8 md:grid-cols-2">
       <div className="max-w-xl">
-        <Heading className={classNames("font-black", level === 1 ? "text-desk" : "text-h1")}>{title}</Heading>
+        <Heading className={classNames("font-black", level === 1 ? "text-h0" : "text-h1")}>{title}</Heading>
         <div className="pt-3 text-[17px] leading-7 text-ink-2">{children}</div>
         {action && <div className="flex flex-wrap items-center gap-4 pt-5">{action}</div>}
       </div>

@@ -18,7 +18,7 @@ export const DimensionLines = memo(function DimensionLines({ drawing, view, litR
         return (
           <g key={d.id} stroke={isLit ? "var(--live-line)" : undefined} strokeWidth={isLit ? 1.75 : undefined}>
             {!isLit && d.extensions.map((line, i) => <Segment key={i} from={toStage(view, line.from)} to={toStage(view, line.to)} width={0.75} />)}
-            <DimensionLine dimension={d} view={view} text={textOf(d)} />
+            <DimensionLine dimension={isCompact ? centred(d) : d} view={view} text={textOf(d)} />
           </g>
         );
       })}
@@ -27,6 +27,9 @@ export const DimensionLines = memo(function DimensionLines({ drawing, view, litR
     </g>
   );
 });
+
+/** Where names and other figures are left out, a figure stands in the middle of its line. */
+export const centred = (d: Dimension): Dimension => ({ ...d, textAt: { x: (d.from.x + d.to.x) / 2, y: (d.from.y + d.to.y) / 2 } });
 
 function DimensionLine({ dimension, view, text }: { dimension: Dimension; view: View; text: string }) {
   const [a, b] = [toStage(view, dimension.from), toStage(view, dimension.to)];

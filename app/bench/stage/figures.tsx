@@ -8,6 +8,7 @@ import { Figure } from "../figure";
 import { showLength } from "../lengths";
 import { isAxis } from "../session";
 import { toStage, type View } from "../view";
+import { centred } from "./dimensions";
 import { isShownCompact } from "./use-drawing";
 
 const AXIS_WORDS: Readonly<Record<string, string>> = { L: "Length", W: "Width", D: "Depth" };
@@ -20,7 +21,7 @@ export function Figures({ drawing, view, isCompact, textOf }: { drawing: Drawing
       {drawing.dimensions.filter((d) => !isCompact || isShownCompact(d)).map((d) => {
         const isVertical = d.measures === "y";
         const isLit = d.row !== null && lit?.row === d.row;
-        const place = placeOf(toStage(view, d.textAt));
+        const place = placeOf(toStage(view, (isCompact ? centred(d) : d).textAt));
         // On a phone figures are typed in the strip and the Ledger, where a thumb can reach them.
         if (d.kind === "asked" && d.parameter && !isCompact && inside(d)) {
           return (

@@ -27,7 +27,7 @@ export interface StageProps {
 }
 
 const WIDE: Insets = { left: 34, right: 24, top: 28, bottom: 20 };
-const COMPACT: Insets = { left: 10, right: 10, top: 10, bottom: 10 };
+const COMPACT: Insets = { left: 14, right: 14, top: 6, bottom: 6 };
 
 export function Stage({ side, hidden, isCompact, findings, onView, className }: StageProps) {
   const { session, units, lit, litPanels } = useBench();
@@ -75,7 +75,8 @@ function Drawn({ view, frame, side, hidden, isCompact, findings, lit, litPanels 
     <>
       <svg width={frame.width} height={frame.height} className="absolute inset-0 block" aria-hidden>
         <g transform={`translate(${view.x} ${view.y}) scale(${view.scale})`}>
-          <Layers carton={carton} side={side} hidden={hidden} scale={view.scale} />
+          {/* Twin creases stay two lines: small drawings have thinner ones. */}
+          <Layers carton={carton} side={side} hidden={hidden} scale={view.scale} thin={view.scale < 0.8 ? 0.65 : 1} />
           <g transform={side === "print" ? "scale(-1 1)" : undefined} fill="var(--wash)" fillOpacity={0.75} stroke="var(--live-line)" strokeWidth={1.75} vectorEffect="non-scaling-stroke">
             {panels.map((panel) => <path key={panel.name} d={dataOf(panel.outline)} vectorEffect="non-scaling-stroke" />)}
           </g>

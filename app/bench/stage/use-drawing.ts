@@ -6,8 +6,8 @@ import type { Carton } from "~/cartons/types";
 import type { Side } from "../bench-context";
 import { fitted, type Frame, type Insets, type View } from "../view";
 
-/** On a phone: what was asked, and the blank's own size. */
-export const isShownCompact = (d: Dimension) => d.kind === "asked" || d.kind === "overall";
+/** On a phone: what was asked. The blank's own size stands in words below. */
+export const isShownCompact = (d: Dimension) => d.kind === "asked";
 
 export const FIGURE_PX = 13;
 const GAP_PX = 20;
@@ -23,7 +23,7 @@ export function fitDrawing(carton: Carton, side: Side, frame: Frame, insets: Ins
   let view = fitted(box, frame, insets);
   for (let round = 0; round < 2; round++) {
     const drawing = drawingAt(carton, side, view.scale, { callouts: false });
-    const bounds = isCompact ? boundsOf(drawing.dimensions.filter(isShownCompact), box, 10 / view.scale) : drawing.bounds;
+    const bounds = isCompact ? boundsOf(drawing.dimensions.filter(isShownCompact), box, 6 / view.scale) : drawing.bounds;
     const around = {
       left: insets.left + (box.minX - bounds.minX) * view.scale,
       right: insets.right + (bounds.maxX - box.maxX) * view.scale,
