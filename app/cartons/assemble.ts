@@ -19,6 +19,10 @@ export type Options = Readonly<Record<string, OptionValue>>;
 export type Declared = { readonly ok: true; readonly blank: Blank; readonly resolved: Resolved } | { readonly ok: false; readonly refusals: readonly Refusal[] };
 
 const AXES = ["L", "W", "D"] as const;
+/** Below this many calipers a panel is a strip and the board is to blame; above it each construction has its own limits on size. */
+const LEAST_CALIPERS = 6;
+/** mm: thinner than any cartonboard. */
+const THINNEST = 0.15;
 
 export function grainOf({ construction }: Registered, board: Board, turned: boolean): "x" | "y" {
   const usual = construction.grain[board.family];
@@ -36,6 +40,11 @@ export function declareWith(registered: Registered, size: Size, options: Options
   const base = { L: size.L, W: size.W, D: size.D, t: board.caliper, a: Math.max(a90.alongGrain, a90.acrossGrain), aLeast: Math.min(a90.alongGrain, a90.acrossGrain), micro: board.family === "micro" ? 1 : 0, cardSlide: slide, creaseSpacing: minimumCreaseSpacing(board) };
   const outOfRange = AXES.flatMap((axis) => sizeRefusal(registered, axis, size[axis]));
   if (outOfRange.length > 0) return { ok: false, refusals: outOfRange };
+  const thickest = Math.min(size.L, size.W) / LEAST_CALIPERS;
+  if (!(board.caliper > 0) || board.caliper > thickest) {
+    const tooThick = board.caliper > thickest;
+    return { ok: false, refusals: [{ code: tooThick ? "too-large" : "too-small", parameter: "caliper", given: board.caliper, limit: tooThick ? { atMost: thickest } : { atLeast: THINNEST }, nearest: tooThick ? thickest : THINNEST, because: tooThick ? "the board is too thick to fold into panels that small" : "a board has a thickness" }] };
+  }
   const resolved = resolve(compiled, options, base);
   const passed = construction.cannot(resolved.scope).flatMap((l) => limitRefusal(l, resolved.scope));
   const swapped: Refusal[] = !construction.mayBeWiderThanLong && size.W > size.L

@@ -1,4 +1,5 @@
 // The only door into the core: a brief and a board go in, a carton or refusals come out.
+import { withCaliper } from "./boards/allowance-card";
 import type { Board } from "./boards/board";
 import { declare, document, type Options } from "./assemble";
 import type { Blank } from "./blank/blank";
@@ -27,7 +28,15 @@ export function buildCarton(brief: Brief, board: Board): CartonResult {
     const again = attempt(registered, other, board);
     return again.ok ? [] : again.refusals;
   };
+  const [first] = result.refusals;
+  if (first?.parameter === "caliper") return { ok: false, refusals: [{ ...first, nearest: thicknessThatWorks(registered, brief, board, Number(first.nearest)) }] };
   return { ok: false, refusals: nearestForAll(result.refusals, brief, registered, refusalsOf) };
+}
+
+/** A thickness of the same kind of board, mm, that is accepted: the limit in tidy figures, or thinner by degrees; null when none is. */
+function thicknessThatWorks(registered: Registered, brief: Brief, board: Board, limit: number): number | null {
+  const tries = [limit, 0.8 * limit, 0.6 * limit, 0.4 * limit, 0.25 * limit].map((t) => Math.floor(t * 100) / 100);
+  return tries.find((t) => t > 0 && attempt(registered, brief, withCaliper(board, t)).ok) ?? null;
 }
 
 /** The same without looking for nearest values. */

@@ -31,7 +31,7 @@ describe.each(listConstructions().map((c) => c.id))("%s", (id) => {
       const result = buildCarton(brief, board);
       if (result.ok) return;
       refused++;
-      const known = new Set(["L", "W", "D", ...Object.keys(brief.options), ...listConstructions().find((c) => c.id === id)!.parameters.map((p) => p.name)]);
+      const known = new Set(["L", "W", "D", "caliper", ...Object.keys(brief.options), ...listConstructions().find((c) => c.id === id)!.parameters.map((p) => p.name)]);
       let mended = brief;
       for (const r of result.refusals) {
         expect(known, JSON.stringify(r)).toContain(r.parameter);

@@ -106,3 +106,15 @@ describe("trays", () => {
     for (const [p, n] of count) expect(n, p).toBe(4);
   });
 });
+
+describe("a board too thick for its panels", () => {
+  it("is refused by its caliper, with a thickness that works", () => {
+    const board = withCaliper(findBoard("sbb-300")!, 9);
+    const result = buildCarton(briefOf("straight-tuck", { L: 60, W: 25, D: 90 }), board);
+    expect(result.ok).toBe(false);
+    if (result.ok) return;
+    const [refusal] = result.refusals;
+    expect(refusal).toMatchObject({ code: "too-large", parameter: "caliper", given: 9 });
+    expect(buildCarton(briefOf("straight-tuck", { L: 60, W: 25, D: 90 }), withCaliper(board, Number(refusal!.nearest))).ok).toBe(true);
+  });
+});
