@@ -68,7 +68,7 @@ function serveFiles(app: Hono<Bindings>, clientDirectory: string): void {
   const root = path.relative(process.cwd(), clientDirectory) || ".";
   app.use(
     "/assets/*",
-    serveStatic({ root, onFound: (_file, c) => c.header("Cache-Control", aYear) }),
+    serveStatic({ root, precompressed: true, onFound: (_file, c) => c.header("Cache-Control", aYear) }),
     async (c) => c.text("There is no such file.\n", 404, { "Cache-Control": "no-store" }),
   );
   app.use(serveStatic({ root, onFound: (_file, c) => c.header("Cache-Control", anHour) }));

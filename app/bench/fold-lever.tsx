@@ -1,10 +1,12 @@
 // The lever along the lower edge of the stage: from flat to closed in the order in which a person folds it.
-import { type KeyboardEvent, type PointerEvent, useRef } from "react";
+import { type KeyboardEvent, lazy, type PointerEvent, Suspense, useRef } from "react";
 import { classNames } from "~/components/class-names";
 import type { Carton } from "~/cartons/types";
 import { clampTo, type Lever, leverWords, nudged, stationAfter, stepAt, useLever } from "./lever";
 import type { FoldMotion } from "./use-fold-motion";
-import { StationPictures } from "./station-pictures";
+
+// The drawing is there before the small pictures: they are worth a moment, not a wait.
+const StationPictures = lazy(() => import("./station-pictures"));
 
 export interface FoldLeverProps {
   carton: Carton;
@@ -73,7 +75,7 @@ export function FoldLever({ carton, lever, motion, isCompact }: FoldLeverProps) 
         <span className="text-small text-ink-2 max-md:hidden">{detail || "Drag, or press F"}</span>
       </div>
       <div className="relative min-w-0 flex-1 px-9 max-md:px-9">
-        {!isCompact && <StationPictures carton={carton} onPick={(at) => motion.goTo(at)} />}
+        {!isCompact && <Suspense fallback={null}><StationPictures carton={carton} onPick={(at) => motion.goTo(at)} /></Suspense>}
         <div
           ref={track}
           onPointerDown={onPointerDown}

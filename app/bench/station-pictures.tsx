@@ -4,7 +4,7 @@ import type { Carton } from "~/cartons/types";
 import { FoldedPicture } from "./folded-picture";
 import { FlatPicture } from "./stage/flat-picture";
 
-export function StationPictures({ carton, onPick }: { carton: Carton; onPick: (u: number) => void }) {
+export default function StationPictures({ carton, onPick }: { carton: Carton; onPick: (u: number) => void }) {
   // While a figure is dragged the drawing comes first; the pictures follow when there is time.
   const shown = useDeferredValue(carton);
   return <Pictures carton={shown} onPick={onPick} />;

@@ -32,17 +32,16 @@ export function Dialog({ isOpen, onClose, title, children, actions, wide }: Dial
       className={classNames("m-auto w-[calc(100%-32px)] border-2 border-ink bg-paper p-0 text-ink", wide ? "max-w-3xl" : "max-w-lg")}
     >
       {isOpen && (
-        <div className="p-5 md:p-6">
-          <div className="flex items-start justify-between gap-4 pb-3">
-            <h2 id={`${id}-title`} className="text-finding font-bold">
-              {title}
-            </h2>
-            <button type="button" onClick={onClose} className="-m-2 inline-flex size-10 items-center justify-center hover:text-live" aria-label="Close">
-              <Icon name="cross" />
-            </button>
-          </div>
+        <div className="relative p-5 md:p-6">
+          <h2 id={`${id}-title`} className="pb-3 pr-10 text-finding font-bold">
+            {title}
+          </h2>
           {children}
           {actions && <div className="flex flex-wrap items-center gap-3 pt-5">{actions}</div>}
+          {/* Last in order, so that the focus begins with the question's own answers. */}
+          <button type="button" onClick={onClose} className="absolute right-2 top-2 inline-flex size-11 items-center justify-center hover:text-live" aria-label="Close">
+            <Icon name="cross" />
+          </button>
         </div>
       )}
     </dialog>

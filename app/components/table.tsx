@@ -49,7 +49,7 @@ export function Table<Row>({ caption, columns, rows, rowKey, sortedBy, csv, coun
         </thead>
         <tbody>
           {rows.map((row) => (
-            <tr key={rowKey(row)} className="border-b border-rule align-baseline hover:bg-board">
+            <tr key={rowKey(row)} className="border-b border-rule align-middle hover:bg-board">
               {columns.map((column, index) => (
                 <td
                   key={column.key}
