@@ -1,7 +1,8 @@
 import type { ReactNode } from "react";
 import { Links, Meta, Outlet, Scripts, ScrollRestoration, type ShouldRevalidateFunctionArgs, useRouteLoaderData } from "react-router";
 import type { Route } from "./+types/root";
-import type { Viewer } from "./auth/viewer";
+import { sessionContext } from "./auth/session-context";
+import { sessionMiddleware } from "./auth/session-middleware.server";
 import { ErrorPage } from "./components/error-page";
 import { PreferencesProvider, readPreferences } from "./components/preferences";
 import { ToastProvider } from "./components/toast";
@@ -15,8 +16,10 @@ export const links: Route.LinksFunction = () => [
   { rel: "icon", href: "/favicon.svg", type: "image/svg+xml" },
 ];
 
-export function loader({ request }: Route.LoaderArgs) {
-  return { preferences: readPreferences(request.headers.get("Cookie")), viewer: null as Viewer | null };
+export const middleware: Route.MiddlewareFunction[] = [sessionMiddleware];
+
+export function loader({ request, context }: Route.LoaderArgs) {
+  return { preferences: readPreferences(request.headers.get("Cookie")), viewer: context.get(sessionContext)?.viewer ?? null };
 }
 
 /** After a form that could not be sent or kept there is nothing new to ask for; asking would put an error page over what was typed. */

@@ -6,8 +6,13 @@ import { createPool } from "mysql2";
 import { hashPassword } from "../app/auth/passwords.server";
 import type { Database } from "../app/db/client.server";
 import { newId } from "../app/db/new-id.server";
+import { signInLimits } from "../app/auth/rate-limit";
+import { purgeSessions } from "../app/db/queries/sessions.server";
+import { purgeTries } from "../app/db/queries/sign-in-attempts.server";
+import { purgeTrash } from "../app/db/queries/trash.server";
 import { clients } from "../app/db/schema/clients";
 import { users } from "../app/db/schema/users";
+import { seedCartons } from "./demo-cartons";
 
 export const demoPassword = "fold-and-crease-1";
 
@@ -47,12 +52,20 @@ export async function prepareData(url: string, { demo }: { demo: boolean }): Pro
   try {
     const db: Database = drizzle({ client: pool });
     if (demo) await seedOnce(db);
+    await keepHouse(db, new Date());
     const found = await db.select({ email: users.email }).from(users).where(inArray(users.email, demoPeople.map((person) => person.email)));
     const emails = new Set(found.map((row) => row.email));
     return emails.size > 0 ? { password: demoPassword, people: demoPeople.filter((person) => emails.has(person.email)) } : null;
   } finally {
     await pool.promise().end();
   }
+}
+
+/** What has run out goes: deleted things after 30 days, sign-ins, old tries. */
+async function keepHouse(db: Database, now: Date): Promise<void> {
+  await purgeTrash(db, now);
+  await purgeSessions(db, now);
+  await purgeTries(db, new Date(now.getTime() - signInLimits.windowMs));
 }
 
 /** All or nothing: a start that is broken off here begins again with an empty database. */
@@ -66,9 +79,12 @@ async function seedOnce(db: Database): Promise<void> {
       clientIds[key as DemoClient] = id;
       await tx.insert(clients).values({ id, ...client });
     }
+    let maker = "";
     for (const person of demoPeople) {
+      const id = newId();
+      if (person.role === "designer") maker = id;
       await tx.insert(users).values({
-        id: newId(),
+        id,
         role: person.role,
         name: person.name,
         email: person.email,
@@ -76,6 +92,7 @@ async function seedOnce(db: Database): Promise<void> {
         passwordHash: await hashPassword(demoPassword),
       });
     }
+    await seedCartons(tx, clientIds, maker);
   });
 }
 

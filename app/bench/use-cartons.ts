@@ -23,5 +23,8 @@ export function useCarton(brief: unknown): Carton | null {
   return useMemo(() => (isBrief(brief) ? drawn(brief).carton : null), [brief]);
 }
 
+/** A stored brief as it came over the wire; null when it is none. */
+export const briefOf = (value: unknown): Brief | null => (isBrief(value) ? value : null);
+
 export const isBrief = (value: unknown): value is Brief =>
   typeof value === "object" && value !== null && "construction" in value && "size" in value && "board" in value && "basis" in value && "options" in value && "typed" in value && "room" in value;
