@@ -6,7 +6,7 @@ export default [
   layout("routes/with-strip.tsx", [
     index("routes/desk.tsx"),
     route("constructions", "routes/gallery.tsx"),
-    route("cartons", "routes/cartons/list.tsx"),
+    ...prefix("cartons", [index("routes/cartons/list.tsx"), route("new", "routes/cartons/new.tsx")]),
     ...prefix("templates", [index("routes/templates/list.tsx"), route(":templateId", "routes/templates/$templateId.tsx")]),
     ...prefix("clients", [index("routes/clients/list.tsx"), route(":clientId", "routes/clients/$clientId.tsx")]),
     route("trash", "routes/trash.tsx"),
@@ -17,7 +17,6 @@ export default [
   ]),
 
   // The Bench has a strip of its own
-  route("cartons/new", "routes/cartons/new.tsx"),
   route("cartons/:cartonId", "routes/cartons/$cartonId.tsx"),
   route("try", "routes/try.tsx"),
 

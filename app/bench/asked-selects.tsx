@@ -23,7 +23,7 @@ function WordSelect({ label, value, onChange, children, words }: { label: string
         aria-label={label}
         value={value}
         onChange={(event) => onChange(event.target.value)}
-        className="min-h-7 max-w-60 cursor-pointer appearance-none truncate [field-sizing:content] border-b border-rule-2 bg-transparent pr-5 text-ink-2 hover:border-ink hover:text-live max-md:min-h-11"
+        className="min-h-7 max-w-60 cursor-pointer appearance-none truncate [field-sizing:content] border-b border-rule-2 bg-transparent pr-5 text-ink-2 hover:border-ink hover:text-live max-md:min-h-11 max-md:border-b-0"
       >
         {children}
       </select>

@@ -5,6 +5,7 @@ import { Button, Switch } from "~/components/button";
 import { classNames } from "~/components/class-names";
 import { Icon } from "~/components/icon";
 import { usePreferences } from "~/components/preferences";
+import { useHydrated } from "~/components/use-hydrated";
 import type { Board } from "~/cartons/boards/board";
 import type { ConstructionInfo, LayerName } from "~/cartons/types";
 import { type BenchActions, BenchProvider, type BenchState, type Lit, type Side } from "./bench-context";
@@ -57,6 +58,7 @@ export function Bench({ opened, boards, constructions, name, canEdit, strip }: B
   const motion = useFoldMotion(lever, session.carton.fold);
   const width = useNarrow();
   const isCompact = width === "phone";
+  const isHydrated = useHydrated();
 
   const latest = useRef(session);
   latest.current = session;
@@ -101,7 +103,7 @@ export function Bench({ opened, boards, constructions, name, canEdit, strip }: B
     <BenchProvider value={bench}>
       <div className="flex min-h-dvh flex-col md:h-dvh md:overflow-hidden">
         {strip({ side, openHelp: () => setHelpOpen(true) })}
-        <main id="content" tabIndex={-1} className="relative flex min-h-0 flex-1 outline-none max-md:flex-col">
+        <main id="content" tabIndex={-1} data-ready={isHydrated} className="relative flex min-h-0 flex-1 outline-none max-md:flex-col">
           <h1 className="sr-only">{name}, on the Bench</h1>
           <div className="flex min-h-0 min-w-0 flex-1 flex-col">
             <div className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2 px-4 pb-2 pt-3 md:pl-8 md:pr-5">

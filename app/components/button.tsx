@@ -21,7 +21,8 @@ function classes(look: ButtonLook, size: ButtonSize, className?: string): string
   const isBox = look === "main" || look === "outline";
   return classNames(
     "inline-flex items-center justify-center gap-2",
-    isBox ? classNames("rounded-control text-center", boxes[size]) : "min-h-6 max-md:min-h-11 text-left leading-[22px]",
+    isBox ? classNames("rounded-control text-center", boxes[size]) : // In the middle of a sentence: the target grows under a thumb, the line does not.
+        "relative min-h-6 text-left leading-[22px] max-md:after:absolute max-md:after:inset-x-0 max-md:after:-inset-y-2.5 max-md:after:content-['']",
     looks[look],
     className,
   );

@@ -40,6 +40,7 @@ export function Figures({ drawing, view, isCompact, textOf }: { drawing: Drawing
                 "flex min-h-6 min-w-6 items-center justify-center whitespace-nowrap px-1",
                 d.kind === "asked" ? "text-figure font-bold" : "text-small text-ink-2",
                 isVertical && "-rotate-90",
+                isCompact && "min-h-0! bg-board px-0.5! leading-[18px]",
                 d.row && "cursor-default",
                 isLit && "bg-wash font-bold text-live",
               )}

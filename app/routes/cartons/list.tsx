@@ -1,6 +1,6 @@
 import { data, Form, Link as RouterLink } from "react-router";
 import { may } from "~/auth/permissions";
-import { requireViewer } from "~/auth/require.server";
+import { requireReach, requireViewer } from "~/auth/require.server";
 import { BriefPicture } from "~/bench/stage/brief-picture";
 import { showSize } from "~/bench/lengths";
 import { briefOf } from "~/bench/use-cartons";
@@ -40,6 +40,7 @@ export async function loader({ request, context }: Route.LoaderArgs) {
 
 export async function action({ request, context }: Route.ActionArgs) {
   const viewer = requireViewer(context);
+  requireReach(viewer, "trash.restore");
   const form = await request.formData();
   if (form.get("intent") !== "restore") return data({ refused: ["This page does not know what to do with that. Load it again."] }, 400);
   await restoreCarton(db, viewer, String(form.get("id") ?? ""));
@@ -97,7 +98,7 @@ export default function Cartons({ loaderData }: Route.ComponentProps) {
         <EmptyState title="No carton like that" action={<ButtonLink to="/cartons" look="main">Show all cartons</ButtonLink>}><p>Search for fewer words, or for another client.</p></EmptyState>
       ) : (
         <>
-          <Table caption="Cartons" columns={columns} rows={cartons.rows} rowKey={(row) => row.id} sortedBy={{ column: "updated", direction: "down" }} csv={`/cartons.csv?${address}`} count={cartons.total === 1 ? "1 carton" : `${cartons.total} cartons`} />
+          <Table caption="Cartons" columns={columns} rows={cartons.rows} rowKey={(row) => row.id} sortedBy={{ column: "updated", direction: "down" }} csv={`/cartons/csv?${address}`} count={cartons.total === 1 ? "1 carton" : `${cartons.total} cartons`} />
           <Pages page={cartons.page} pageCount={cartons.pageCount} />
         </>
       )}

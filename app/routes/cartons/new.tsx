@@ -37,6 +37,7 @@ export async function loader({ request, context }: Route.LoaderArgs) {
 
 export async function action({ request, context }: Route.ActionArgs) {
   const viewer = requireViewer(context);
+  requireReach(viewer, "carton.write");
   const form = await request.formData();
   const parsed = parseForm(form, cartonDetailsSchema);
   const checked = checkBrief(form.get("brief"));

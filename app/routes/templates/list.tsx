@@ -1,6 +1,6 @@
 import { data, Form, Link as RouterLink } from "react-router";
 import { may } from "~/auth/permissions";
-import { requireViewer } from "~/auth/require.server";
+import { requireReach, requireViewer } from "~/auth/require.server";
 import { showSize } from "~/bench/lengths";
 import { BriefPicture } from "~/bench/stage/brief-picture";
 import { briefOf } from "~/bench/use-cartons";
@@ -29,6 +29,7 @@ export async function loader({ request, context }: Route.LoaderArgs) {
 
 export async function action({ request, context }: Route.ActionArgs) {
   const viewer = requireViewer(context);
+  requireReach(viewer, "trash.restore");
   const form = await request.formData();
   if (form.get("intent") !== "restore") return data({ refused: ["This page does not know what to do with that. Load it again."] }, 400);
   await restoreTemplate(db, viewer, String(form.get("id") ?? ""));
@@ -83,7 +84,7 @@ export default function Templates({ loaderData }: Route.ComponentProps) {
         <EmptyState title="No template like that" action={<ButtonLink to="/templates" look="main">Show all templates</ButtonLink>}><p>Search for fewer words.</p></EmptyState>
       ) : (
         <>
-          <Table caption="Templates" columns={columns} rows={templates.rows} rowKey={(row) => row.id} sortedBy={{ column: "name", direction: "up" }} csv={`/templates.csv?${address}`} count={templates.total === 1 ? "1 template" : `${templates.total} templates`} />
+          <Table caption="Templates" columns={columns} rows={templates.rows} rowKey={(row) => row.id} sortedBy={{ column: "name", direction: "up" }} csv={`/templates/csv?${address}`} count={templates.total === 1 ? "1 template" : `${templates.total} templates`} />
           <Pages page={templates.page} pageCount={templates.pageCount} />
         </>
       )}
