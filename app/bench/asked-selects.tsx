@@ -1,8 +1,10 @@
 // What is asked beside the figures: which size they are, and the board.
 import { Icon } from "~/components/icon";
-import type { SizeBasis } from "~/cartons/types";
+import type { UnitName } from "~/components/preferences";
+import type { Brief, SizeBasis } from "~/cartons/types";
 import { useBench } from "./bench-context";
 import { Figure } from "./figure";
+import { showLength, showSize } from "./lengths";
 import { boardGroups } from "./board-choices";
 
 export const basisWords: { readonly [Basis in SizeBasis]: string } = {
@@ -11,6 +13,11 @@ export const basisWords: { readonly [Basis in SizeBasis]: string } = {
   outside: "outside",
   product: "the product's, plus room",
 };
+/** "82 × 27 × 56 mm inside": a size never stands without saying which it is. */
+export function askedSizeWords({ size, basis, room }: Pick<Brief, "size" | "basis" | "room">, units: UnitName): string {
+  return basis === "product" ? `${showSize(size, units)} of product, ${showLength(room, units)} ${units} of room` : `${showSize(size, units)} ${basisWords[basis]}`;
+}
+
 const bases = Object.entries(basisWords) as [SizeBasis, string][];
 
 /** A choice that reads as part of a sentence. */

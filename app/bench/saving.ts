@@ -1,31 +1,7 @@
 // How saving stands. Pure: what the server answered and what is on the Bench give one state and one sentence.
 import type { Brief } from "~/cartons/types";
-import type { Problem } from "~/copy/errors";
+import type { SaveAnswer, SavedCarton } from "~/forms/save-answer";
 import { isSameBrief } from "./session";
-
-/** A carton as it was last saved. */
-export interface SavedCarton {
-  readonly brief: Brief;
-  readonly rowVersion: number;
-  readonly name: string;
-  readonly note: string;
-  readonly clientId: string | null;
-  readonly clientName: string | null;
-  readonly updatedAt: string;
-  readonly updatedBy: string;
-}
-
-/** What the actions of a carton's page answer. */
-export type SaveAnswer =
-  | { readonly saved: SavedCarton }
-  | { readonly conflict: SavedCarton }
-  | { readonly refused: readonly string[] }
-  | { readonly errors: Readonly<Record<string, readonly string[]>>; readonly values: Readonly<Record<string, string>> }
-  | { readonly template: { readonly id: string; readonly name: string } }
-  | { readonly copied: { readonly id: string } }
-  | { readonly deleted: string }
-  | { readonly problem: Problem }
-  | { readonly offline: true };
 
 export type SaveState =
   | { readonly kind: "saved" | "unsaved" | "saving" | "refused" }

@@ -72,6 +72,11 @@ export function FileLink({ href, children, look = "plain", className, ...rest }:
   );
 }
 
+/** The name of a row in a list: bold, and large enough for a thumb without taking more room. */
+export function RowLink({ className, ...rest }: LinkProps) {
+  return <RouterLink {...rest} className={classNames("relative font-bold hover:text-live after:absolute after:inset-x-0 after:-inset-y-1 after:content-[''] max-md:after:-inset-y-3", className)} />;
+}
+
 export function Link({ className, ...rest }: LinkProps) {
   return <RouterLink {...rest} className={classNames("underline decoration-rule-2 decoration-1 underline-offset-4 hover:decoration-ink hover:text-live", className)} />;
 }

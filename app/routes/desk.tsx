@@ -1,12 +1,12 @@
-import { Link as RouterLink } from "react-router";
 import { may } from "~/auth/permissions";
 import { requireViewer } from "~/auth/require.server";
-import { showSize, withUnit } from "~/bench/lengths";
+import { askedSizeWords } from "~/bench/asked-selects";
+import { withUnit } from "~/bench/lengths";
 import { BriefPicture } from "~/bench/stage/brief-picture";
 import { briefOf, drawn } from "~/bench/use-cartons";
 import { When } from "~/bench/when";
 import { listConstructions } from "~/cartons/constructions/registry";
-import { ButtonLink, Link } from "~/components/button";
+import { ButtonLink, Link, RowLink } from "~/components/button";
 import { EmptyState, Page, PageHeader, Section } from "~/components/page";
 import { type UnitName, usePreferences } from "~/components/preferences";
 import { StateBadge } from "~/components/state-badge";
@@ -81,7 +81,7 @@ export default function Desk({ loaderData }: Route.ComponentProps) {
               <li key={template.id} className="flex items-center gap-4 border-b border-rule py-2.5">
                 <span className="flex w-16 shrink-0 justify-center"><BriefPicture brief={template.brief} width={60} height={44} /></span>
                 <span className="min-w-0 flex-1">
-                  <RouterLink to={`/templates/${template.id}`} className="inline-flex min-h-6 items-center font-bold hover:text-live">{template.name}</RouterLink>
+                  <RowLink to={`/templates/${template.id}`}>{template.name}</RowLink>
                   <span className="block truncate text-small text-ink-2">{template.clientName ?? "for every client"}</span>
                 </span>
                 {canEdit && <Link to={`/cartons/new?template=${template.id}`} aria-label={`Start a carton from ${template.name}`}>Start</Link>}
@@ -110,17 +110,17 @@ function waitingFor(row: Row, units: UnitName): readonly Waiting[] {
 function DeskRow({ row, units, sentence }: { row: Row; units: UnitName; sentence: string | null }) {
   const brief = briefOf(row.brief);
   return (
-    <li className="grid items-center gap-x-6 gap-y-1 border-b border-rule py-3 md:grid-cols-[76px_minmax(0,1.1fr)_minmax(0,1.4fr)_auto]">
-      <span className="flex justify-center max-md:hidden"><BriefPicture brief={row.brief} width={72} height={48} /></span>
+    <li className="grid grid-cols-[64px_minmax(0,1fr)] items-center gap-x-4 gap-y-1 border-b border-rule py-3 md:grid-cols-[76px_minmax(0,1fr)_minmax(0,1.4fr)_220px] md:gap-x-6">
+      <span className="flex justify-center max-md:row-span-3 max-md:self-start max-md:pt-1"><BriefPicture brief={row.brief} width={64} height={48} /></span>
       <span className="min-w-0">
-        <RouterLink to={`/cartons/${row.id}`} className="inline-flex min-h-6 items-center font-bold hover:text-live max-md:min-h-11">{row.name}</RouterLink>
+        <RowLink to={`/cartons/${row.id}`}>{row.name}</RowLink>
         <span className="block text-small text-ink-2">{row.clientName ?? "The studio"}</span>
       </span>
       <span className="min-w-0">
         {sentence ? (
           <span className="flex items-start gap-2"><StateBadge state="warning">{" "}</StateBadge><span>{sentence}</span></span>
         ) : (
-          brief && <span>{showSize(brief.size, units)}</span>
+          brief && <span>{listConstructions().find((c) => c.id === brief.construction)?.name ?? brief.construction}, {askedSizeWords(brief, units)}</span>
         )}
       </span>
       <span className="text-right text-small text-ink-2 max-md:text-left">Saved <When at={row.updatedAt} />, {row.updatedBy}</span>

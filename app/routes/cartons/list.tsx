@@ -1,4 +1,4 @@
-import { data, Form, Link as RouterLink } from "react-router";
+import { data, Form } from "react-router";
 import { may } from "~/auth/permissions";
 import { requireReach, requireViewer } from "~/auth/require.server";
 import { BriefPicture } from "~/bench/stage/brief-picture";
@@ -9,7 +9,7 @@ import { basisWords } from "~/bench/asked-selects";
 import { findBoard } from "~/cartons/boards/catalogue";
 import type { Brief } from "~/cartons/types";
 import { listConstructions } from "~/cartons/constructions/registry";
-import { Button, ButtonLink } from "~/components/button";
+import { Button, ButtonLink, RowLink } from "~/components/button";
 import { SelectField, TextField } from "~/components/field";
 import { readListAddress } from "~/components/list-address";
 import { EmptyState, Page, PageHeader } from "~/components/page";
@@ -64,7 +64,7 @@ export default function Cartons({ loaderData }: Route.ComponentProps) {
       cell: (row) => (
         <span className="flex items-center gap-4">
           <span className="flex w-16 shrink-0 justify-center max-md:hidden"><BriefPicture brief={row.brief} width={60} height={44} /></span>
-          <RouterLink to={`/cartons/${row.id}`} className="inline-flex min-h-6 items-center font-bold hover:text-live max-md:min-h-11">{row.name}</RouterLink>
+          <RowLink to={`/cartons/${row.id}`}>{row.name}</RowLink>
         </span>
       ),
     },
@@ -72,7 +72,7 @@ export default function Cartons({ loaderData }: Route.ComponentProps) {
     { key: "construction", head: "Construction", sort: "construction", least: true, cell: (row) => constructions.find((c) => c.id === row.construction)?.name ?? row.construction },
     { key: "size", head: "Size", align: "right", cell: (row) => <SizeOf brief={briefOf(row.brief)} units={units} /> },
     { key: "board", head: "Board", least: true, cell: (row) => findBoard(row.board)?.name ?? row.board },
-    { key: "updated", head: "Saved", sort: "updated", align: "right", cell: (row) => <span className="text-small"><When at={row.updatedAt} /><span className="block text-label text-ink-3 max-md:hidden">{row.updatedBy}</span></span> },
+    { key: "updated", head: "Saved", sort: "updated", align: "right", least: true, cell: (row) => <span className="text-small"><When at={row.updatedAt} /><span className="block text-label text-ink-3 max-md:hidden">{row.updatedBy}</span></span> },
   ];
   const add = canEdit && <ButtonLink to="/cartons/new" look="main">New carton</ButtonLink>;
   if (cartons.total === 0 && !isFiltered) {

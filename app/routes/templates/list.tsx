@@ -1,13 +1,13 @@
-import { data, Form, Link as RouterLink } from "react-router";
+import { data, Form } from "react-router";
 import { may } from "~/auth/permissions";
 import { requireReach, requireViewer } from "~/auth/require.server";
-import { showSize } from "~/bench/lengths";
+import { askedSizeWords } from "~/bench/asked-selects";
 import { BriefPicture } from "~/bench/stage/brief-picture";
 import { briefOf } from "~/bench/use-cartons";
 import { When } from "~/bench/when";
 import type { Brief } from "~/cartons/types";
 import { listConstructions } from "~/cartons/constructions/registry";
-import { Button, ButtonLink } from "~/components/button";
+import { Button, ButtonLink, RowLink } from "~/components/button";
 import { TextField } from "~/components/field";
 import { readListAddress } from "~/components/list-address";
 import { EmptyState, Page, PageHeader } from "~/components/page";
@@ -38,7 +38,7 @@ export async function action({ request, context }: Route.ActionArgs) {
 
 type Row = Route.ComponentProps["loaderData"]["templates"]["rows"][number];
 
-const sizeText = (brief: Brief | null, units: UnitName): string => (brief ? showSize(brief.size, units) : "");
+const sizeText = (brief: Brief | null, units: UnitName): string => (brief ? askedSizeWords(brief, units) : "");
 
 export default function Templates({ loaderData }: Route.ComponentProps) {
   const { templates, canStart, q, address } = loaderData;
@@ -51,8 +51,8 @@ export default function Templates({ loaderData }: Route.ComponentProps) {
         <span className="flex items-center gap-4">
           <span className="flex w-16 shrink-0 justify-center max-md:hidden"><BriefPicture brief={row.brief} width={60} height={44} /></span>
           <span>
-            <RouterLink to={`/templates/${row.id}`} className="inline-flex min-h-6 items-center font-bold hover:text-live max-md:min-h-11">{row.name}</RouterLink>
-            {row.note && <span className="block max-w-md truncate text-small text-ink-2">{row.note}</span>}
+            <RowLink to={`/templates/${row.id}`}>{row.name}</RowLink>
+            {row.note && <span className="line-clamp-2 max-w-md text-small text-ink-2">{row.note}</span>}
           </span>
         </span>
       ),
@@ -61,7 +61,7 @@ export default function Templates({ loaderData }: Route.ComponentProps) {
     { key: "construction", head: "Construction", sort: "construction", least: true, cell: (row) => constructions.find((c) => c.id === row.construction)?.name ?? row.construction },
     { key: "size", head: "Size", align: "right", least: true, cell: (row) => <span className="whitespace-nowrap">{sizeText(briefOf(row.brief), units)}</span> },
     { key: "updated", head: "Saved", sort: "updated", align: "right", least: true, cell: (row) => <span className="text-small"><When at={row.updatedAt} /></span> },
-    ...(canStart ? [{ key: "start", head: "Start", align: "right" as const, cell: (row: Row) => <ButtonLink to={`/cartons/new?template=${row.id}`} look="plain" aria-label={`Start a carton from ${row.name}`}>Start a carton</ButtonLink> }] : []),
+    ...(canStart ? [{ key: "start", head: "Start", align: "right" as const, cell: (row: Row) => <ButtonLink to={`/cartons/new?template=${row.id}`} look="plain" aria-label={`Start a carton from ${row.name}`} className="whitespace-nowrap">Start</ButtonLink> }] : []),
   ];
   if (templates.total === 0 && !q) {
     return (
