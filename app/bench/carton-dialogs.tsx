@@ -4,7 +4,8 @@ import { useFetcher } from "react-router";
 import { Button } from "~/components/button";
 import { Dialog } from "~/components/dialog";
 import { ErrorSentence, RadioGroup, SelectField, TextArea, TextField } from "~/components/field";
-import { OFFLINE, type SaveAnswer, type SavedCarton } from "./saving";
+import type { SaveAnswer, SavedCarton } from "~/forms/save-answer";
+import { OFFLINE } from "./saving";
 import type { Brief } from "~/cartons/types";
 
 interface FormDialogProps {

@@ -10,7 +10,8 @@ import { type Side, useBench } from "./bench-context";
 import { DetailsDialog, TemplateDialog } from "./carton-dialogs";
 import { ConflictDialog } from "./conflict-dialog";
 import { ExportMenu } from "./export-menu";
-import type { SaveAnswer, SavedCarton, SaveState } from "./saving";
+import type { SaveAnswer, SavedCarton } from "~/forms/save-answer";
+import type { SaveState } from "./saving";
 import { timeWords, useSaving } from "./use-saving";
 
 export interface CartonStripProps {

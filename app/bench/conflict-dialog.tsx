@@ -6,7 +6,8 @@ import { parameterLabel } from "~/copy/refusals";
 import { basisWords } from "./asked-selects";
 import { useBench } from "./bench-context";
 import { kindOf, showOption } from "./lengths";
-import { differences, type SavedCarton } from "./saving";
+import type { SavedCarton } from "~/forms/save-answer";
+import { differences } from "./saving";
 import { timeWords } from "./use-saving";
 
 export function ConflictDialog({ isOpen, theirs, onClose, onTakeTheirs, onSaveOver, onCopy }: { isOpen: boolean; theirs: SavedCarton; onClose: () => void; onTakeTheirs: () => void; onSaveOver: () => void; onCopy: () => void }) {

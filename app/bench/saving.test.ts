@@ -1,7 +1,8 @@
 import { describe, expect, it } from "vitest";
 import { problemFor } from "~/copy/errors";
 import type { Brief } from "~/cartons/types";
-import { differences, type SavedCarton, saveStateOf, type SavingFacts } from "./saving";
+import type { SavedCarton } from "~/forms/save-answer";
+import { differences, saveStateOf, type SavingFacts } from "./saving";
 
 const brief: Brief = { construction: "tray", size: { L: 113, W: 71, D: 29 }, basis: "inside", room: 1, board: "e-flute", options: {}, typed: {} };
 const saved: SavedCarton = { brief, rowVersion: 3, name: "Tray", note: "", clientId: null, clientName: null, updatedAt: "2031-03-05T11:07:00.000Z", updatedBy: "Orla" };

@@ -3,7 +3,8 @@ import { useCallback, useEffect, useRef, useState } from "react";
 import { useFetcher } from "react-router";
 import { useBench } from "./bench-context";
 import { type Draft, dropDraft, readDraft, writeDraft } from "./draft";
-import { type SaveAnswer, type SavedCarton, type SaveState, saveStateOf } from "./saving";
+import type { SaveAnswer, SavedCarton } from "~/forms/save-answer";
+import { type SaveState, saveStateOf } from "./saving";
 import { isSameBrief } from "./session";
 
 export interface Saving {

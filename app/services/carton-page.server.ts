@@ -9,7 +9,7 @@ import { createTemplate } from "~/db/queries/templates.server";
 import { cartonDetailsSchema, rowVersion } from "~/forms/carton";
 import { parseForm, typedValues } from "~/forms/parse-form";
 import { templateDetailsSchema } from "~/forms/template";
-import type { SaveAnswer, SavedCarton } from "~/bench/saving";
+import type { SaveAnswer, SavedCarton } from "~/forms/save-answer";
 import { checkBrief, constructionVersion } from "./brief-to-store.server";
 
 /** As the Bench gets it. Throws `unknown` for a stored brief that is none: that is a defect, not something a person typed. */
