@@ -7,6 +7,7 @@ import { drawingOf } from "../drawing";
 import { layersSeen, seenBox, sideWords } from "../sheet-view";
 import { constructionText, legendOf, type SheetFacts } from "../title-block";
 import { drawLayers } from "./blank";
+import { drawFolded, placeForPicture } from "./folded";
 import { drawFigures } from "./figures";
 import { embedFaces, oneLine, type Faces, type FontBytes } from "./fonts";
 import { createInk, POINTS, type Ink } from "./ink";
@@ -22,7 +23,7 @@ export interface PdfOptions extends SheetFacts {
 
 /** Everything that people typed and that is printed: tells which font files are needed. */
 export const typedTexts = (carton: Carton, facts: SheetFacts): string[] => [
-  facts.title, facts.client, facts.revision, facts.date, facts.drawnBy ?? "", carton.board.name, constructionText(carton), ...carton.panels.map((p) => p.label.toUpperCase()),
+  facts.title, facts.client, facts.revision, facts.date, facts.drawnBy ?? "", carton.board.name, constructionText(carton), ...carton.panels.map((p) => p.label.toUpperCase()), carton.fold.steps.at(-1)?.label ?? "",
 ];
 
 /**
@@ -41,8 +42,9 @@ export async function pdfOf(carton: Carton, options: PdfOptions): Promise<Uint8A
     width: bounds.maxX - bounds.minX, height: bounds.maxY - bounds.minY,
     legendHeight: legendHeight(legendOf(carton, options.side).length), notesHeight: notesHeight(carton, drawing, faces),
   });
-  const dx = (layout.stage.minX + layout.stage.maxX - bounds.minX - bounds.maxX) / 2;
-  const dy = (layout.stage.minY + layout.stage.maxY - bounds.minY - bounds.maxY) / 2;
+  const { stage, picture } = placeForPicture(layout, drawing, carton, faces);
+  const dx = (stage.minX + stage.maxX - bounds.minX - bounds.maxX) / 2;
+  const dy = (stage.minY + stage.maxY - bounds.minY - bounds.maxY) / 2;
   const groups = registerGroups(document, groupsFor((name: LayerName) => layers[name].length > 0));
   const ink = createInk();
   drawFrame(ink, layout, faces);
@@ -53,6 +55,7 @@ export async function pdfOf(carton: Carton, options: PdfOptions): Promise<Uint8A
   drawTitleBlock(ink, layout.titleBlock, carton, options, faces);
   drawLegend(ink, layout.legend, carton, options, faces);
   drawNotes(ink, layout.notes, carton, drawing, faces);
+  if (picture) drawFolded(ink, picture, carton, faces);
   addPage(document, layout.width, layout.height, ink, faces, groups, (page) => {
     const trim = seenBox(carton.blank.bounds, options.side);
     setBoxes(page, trim, bleedBox(trim, layers.bleed.map((p) => p.path)), dx, dy);
