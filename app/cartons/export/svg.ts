@@ -1,4 +1,5 @@
 // Cartons as SVG in millimetres. Nothing is drawn here but the layers: dimensions and titles belong to the PDF.
+import type { Box } from "../geometry/outline";
 import { boundsOf, pathData, shifted } from "../geometry/path";
 import type { Carton, LayerName } from "../types";
 import { plain } from "./number";
@@ -21,6 +22,12 @@ const PLAIN = /^[ !#-%'-;=?-~]*$/;
 /** Text fit for XML: mark-up escaped, characters that XML forbids left out. */
 export const xmlText = (text: string): string => PLAIN.test(text) ? text : text.replace(/[\u0000-\u0008\u000B\u000C\u000E-\u001F\uFFFE\uFFFF]/g, "").replace(/[&<>"]/g, (c) => MARKUP[c]!);
 
+/** To the nearest thousandth of a millimetre: the chords of the bleed do not push the cut off its round figures. */
+function frameOf(b: Box): Box {
+  const near = (value: number) => Math.round(value * 1000) / 1000;
+  return { minX: near(b.minX), minY: near(b.minY), maxX: near(b.maxX), maxY: near(b.maxY) };
+}
+
 /**
  * The carton as an SVG document at true size: width and height in mm, one user unit a millimetre, y downwards, the
  * upper left corner of all layers at 0 0. One group a layer, named by its ISO 19593-1 step. The same input gives the
@@ -31,7 +38,7 @@ export function svgOf(carton: Carton, options: SvgOptions): string {
   const names = LAYER_ORDER.filter((name) => layers[name].length > 0 && (options.layers === undefined || options.layers.includes(name)));
   const paths = names.flatMap((name) => layers[name].map((p) => p.path));
   // Nothing to draw? Then the frame is the blank's own.
-  const box = paths.length > 0 ? boundsOf(paths) : seenBox(carton.blank.bounds, options.side);
+  const box = frameOf(paths.length > 0 ? boundsOf(paths) : seenBox(carton.blank.bounds, options.side));
   const width = plain(box.maxX - box.minX);
   const height = plain(box.maxY - box.minY);
   const title = xmlText(options.title ?? carton.construction.name);
