@@ -87,6 +87,19 @@ describe("openSession", () => {
     expect(session.asked.size.L).toBe(7);
   });
 
+  it("tells all that is wrong at once, though a build stops at the first kind of it", () => {
+    // Sizes are judged before options here, and no length works while the option is there.
+    const staged: Build = (asked) => {
+      const sizes = asked.size.L < 50 ? [{ code: "too-small" as const, parameter: "L", given: asked.size.L, limit: { atLeast: 50 }, nearest: null, because: "the flaps would meet" }] : [];
+      const options = "hole" in asked.options ? [{ code: "unknown-option" as const, parameter: "hole", given: 12, limit: null, nearest: null, because: "there is no such option" }] : [];
+      const refusals = sizes.length > 0 ? sizes : options;
+      return refusals.length > 0 ? { ok: false, refusals } : build(asked);
+    };
+    const session = openSession(staged, { ...brief, size: { L: 7, W: 71, D: 29 }, options: { hole: 12 } });
+    expect(session?.refusals.map((r) => [r.parameter, r.nearest])).toEqual([["L", 50], ["hole", null]]);
+    expect(session?.carton.brief).toMatchObject({ size: { L: 50, W: 71, D: 29 }, options: {} });
+  });
+
   it("opens nothing where nothing can be drawn", () => {
     expect(openSession(build, { ...brief, construction: "gone" })).toBeNull();
   });

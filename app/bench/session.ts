@@ -71,21 +71,50 @@ export function openSession(build: Build, brief: Brief): Session | null {
   const empty = { asked: brief, past: [], future: [], gesture: null };
   const result = build(brief);
   if (result.ok) return { ...empty, carton: result.carton, refusals: [] };
-  const mended = nearestThatWorks(build, brief, result.refusals);
-  return mended ? { ...empty, carton: mended, refusals: result.refusals } : null;
+  const { carton, refusals } = everythingRefused(build, brief, result.refusals);
+  return carton ? { ...empty, carton, refusals } : null;
 }
 
-/** Each round mends what is refused; what has no nearest value is put back to its default. */
-function nearestThatWorks(build: Build, brief: Brief, refusals: readonly Refusal[]): Carton | null {
+/**
+ * A build stops at the first kind of thing that is wrong; here each is mended in turn until it holds, so that all of
+ * it can be told at once. `nearest` is then the value that works together with the other mends.
+ */
+export function everythingRefused(build: Build, brief: Brief, first: readonly Refusal[]): { readonly carton: Carton | null; readonly refusals: readonly Refusal[] } {
+  const all = mendedInTurn(build, brief, first);
+  const gone = all.refusals.filter((r) => r.code === "unknown-option");
+  if (gone.length === 0) return all;
+  // While an option is asked that is gone no value of another works: what else is wrong is judged without it.
+  const without = gone.reduce((b, r) => withDefault(b, r.parameter), brief);
+  const result = build(without);
+  if (result.ok) return { carton: result.carton, refusals: gone };
+  const others = mendedInTurn(build, without, result.refusals);
+  return { carton: others.carton, refusals: [...others.refusals, ...gone] };
+}
+
+function mendedInTurn(build: Build, brief: Brief, first: readonly Refusal[]): { readonly carton: Carton | null; readonly refusals: readonly Refusal[] } {
+  const found = new Map<string, Refusal>();
   let at = brief;
-  let against = refusals;
+  let against = first;
   for (let round = 0; round < 8; round++) {
-    at = against.reduce((b, r) => (r.nearest === null ? withDefault(b, r.parameter) : withValue(b, r.parameter, r.nearest)), at);
+    for (const refusal of against) if (!found.has(refusal.parameter)) found.set(refusal.parameter, refusal);
+    at = against.reduce(mended, at);
     const result = build(at);
-    if (result.ok) return result.carton;
+    if (result.ok) {
+      const { carton } = result;
+      const isKept = (parameter: string) => isAxis(parameter) || parameter in at.options;
+      return { carton, refusals: [...found.values()].map((r) => (r.nearest === null && isKept(r.parameter) ? { ...r, nearest: askedValue({ asked: at, carton }, r.parameter) } : r)) };
+    }
     against = result.refusals;
   }
-  return null;
+  return { carton: null, refusals: [...found.values()] };
+}
+
+/** The nearest value; where none works alone, the limit itself; where there is none either, the default. */
+function mended(brief: Brief, { parameter, nearest, limit }: Refusal): Brief {
+  if (nearest !== null) return withValue(brief, parameter, nearest);
+  if (limit && "atLeast" in limit) return withValue(brief, parameter, limit.atLeast);
+  if (limit && "atMost" in limit) return withValue(brief, parameter, limit.atMost);
+  return withDefault(brief, parameter);
 }
 
 const axes: readonly string[] = ["L", "W", "D"];

@@ -1,9 +1,9 @@
 // A look without signing in: the Bench on a sample carton, all of it but saving.
-import { expect, expectAccessible, expectNoSideways, figure, finding, isPhone, test, typeFigure } from "../support/journey";
+import { benchReady, expect, expectAccessible, expectNoSideways, figure, finding, isPhone, test, typeFigure } from "../support/journey";
 
 test.beforeEach(async ({ page }) => {
   await page.goto("/try");
-  await expect(page.locator("main svg").first()).toBeVisible();
+  await benchReady(page);
 });
 
 test("shows the blank, its sizes side by side and what the fold check found", async ({ page }) => {
@@ -143,6 +143,7 @@ test("shows inches and never changes the carton for it", async ({ page }) => {
   await page.getByRole("group", { name: "Units" }).filter({ visible: true }).getByRole("button", { name: "in" }).click();
   await expect(finding(page)).toHaveText("Folds shut on 9.449 × 6.693 × 2.362 in inside, as asked.");
   await page.reload();
+  await benchReady(page);
   await expect(finding(page)).toHaveText("Folds shut on 9.449 × 6.693 × 2.362 in inside, as asked.");
 });
 

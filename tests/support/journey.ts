@@ -6,7 +6,7 @@ import { test as base, expect, type Page } from "@playwright/test";
 const KNOWN = [/GL Driver Message/, /THREE\.Clock: This module has been deprecated/, /GPU stall due to ReadPixels/];
 
 interface Journey {
-  /** Console errors that this journey provokes on purpose, e.g. a refused save. */
+  /** Console errors that this journey provokes on purpose, e.g. a refused save: a list of one, for two would be read as a value and its options. */
   expectedErrors: RegExp[];
   quietConsole: void;
 }
@@ -43,6 +43,9 @@ export async function expectNoSideways(page: Page): Promise<void> {
 }
 
 export const isPhone = (page: Page): boolean => (page.viewportSize()?.width ?? 0) < 768;
+
+/** Waits until the Bench listens to keys and pointers. */
+export const benchReady = (page: Page) => expect(page.locator("main[data-ready=true]")).toBeVisible();
 
 /** The sentence at the top of the Bench. */
 export const finding = (page: Page) => page.locator("main").getByRole("status").first();

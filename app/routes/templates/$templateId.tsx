@@ -11,6 +11,7 @@ import { When } from "~/bench/when";
 import { BOARDS } from "~/cartons/boards/catalogue";
 import { briefSchema } from "~/cartons/brief";
 import { Button, ButtonLink } from "~/components/button";
+import { classNames } from "~/components/class-names";
 import { ErrorSentence, SelectField, TextArea, TextField } from "~/components/field";
 import { Page, PageHeader } from "~/components/page";
 import { usePreferences } from "~/components/preferences";
@@ -54,7 +55,7 @@ export default function Template({ loaderData, actionData }: Route.ComponentProp
   const toast = useToast();
   const [opened] = useState(() => openFor(template.brief, BOARDS));
   const result = builderFor(BOARDS)(template.brief);
-  const refusals = result.ok ? [] : result.refusals;
+  const refusals = opened?.refusals ?? (result.ok ? [] : result.refusals);
   const errors = actionData && "errors" in actionData ? (actionData.errors as Readonly<Record<string, readonly string[]>>) : {};
   const problem = problemOf(actionData);
   useEffect(() => {
@@ -76,8 +77,8 @@ export default function Template({ loaderData, actionData }: Route.ComponentProp
       <NoLongerFits template={template} refusals={refusals} />
       <div className="grid gap-x-14 gap-y-8 pt-6 lg:grid-cols-[minmax(0,1fr)_380px]">
         {opened && (
-          <section aria-label="What it makes" className={refusals.length > 0 ? "opacity-60" : undefined}>
-            <div className="flex flex-wrap items-center gap-8">
+          <section aria-label="What it makes">
+            <div className={classNames("flex flex-wrap items-center gap-8", refusals.length > 0 && "opacity-60")}>
               <FlatPicture carton={opened.carton} width={400} height={300} title={`${opened.carton.construction.name}, flat`} className="h-auto max-w-full" />
               <FoldedPicture carton={opened.carton} width={240} height={220} title={`${opened.carton.construction.name}, closed`} className="h-auto max-w-full" />
             </div>
