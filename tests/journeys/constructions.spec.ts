@@ -22,6 +22,9 @@ test("filters and searches, and keeps that in the address", async ({ page }) => 
   await expect(page).toHaveURL(/glue=no/);
   await expect(page.getByRole("article")).toHaveCount(1);
   await page.getByRole("link", { name: "Clear" }).click();
+  // The page is drawn anew when the address has changed: what is typed before that is lost.
+  await expect(page).not.toHaveURL(/glue=/);
+  await expect(page.getByRole("article")).toHaveCount(5);
   await page.getByLabel("Search").fill("0301");
   await page.getByLabel("Search").press("Enter");
   await expect(page.getByRole("article")).toHaveCount(1);
