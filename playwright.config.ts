@@ -11,6 +11,8 @@ export default defineConfig({
   reporter: [["list"], ["json"]],
   forbidOnly: Boolean(process.env.CI),
   workers: 2,
+  // On a shared machine a browser may be starved once; what fails twice has failed.
+  retries: process.env.CI ? 1 : 0,
   timeout: 120_000,
   expect: { timeout: 20_000 },
   use: {
