@@ -15,7 +15,7 @@ export function countPlaywright(file, status) {
   const report = readJson(file);
   if (!report) return nothing;
   const { expected, unexpected, flaky, skipped } = report.stats;
-  return atLeastOneFailure({ passed: expected, failed: unexpected + flaky + (expected + unexpected + flaky === 0 ? report.errors.length : 0), skipped }, status);
+  return atLeastOneFailure({ passed: expected + flaky, failed: unexpected + (expected + unexpected + flaky === 0 ? report.errors.length : 0), skipped }, status);
 }
 
 /** The runner says that something is wrong, but no test did: that counts too. */

@@ -7,7 +7,7 @@ import type { LayerName, LayerPath, Layers } from "../types";
 import { bleedAreas } from "./bleed";
 import { glueAreas } from "./glue-areas";
 import { safeAreas } from "./safe-area";
-import { walkBoundary, type SharedLine } from "./walk";
+import { tidied, walkBoundary, type SharedLine } from "./walk";
 
 export interface AreaSizes {
   readonly bleed: number;
@@ -16,6 +16,9 @@ export interface AreaSizes {
 }
 
 const line = (l: SharedLine): Path => ({ closed: false, vertices: [{ ...l.from, bulge: 0 }, { ...l.to, bulge: 0 }] });
+
+/** Areas come from clipping, which may leave points in the middle of a straight run: a cutter's file has none. */
+const tidy = (area: LayerPath): LayerPath => ({ ...area, path: { closed: true, vertices: tidied(area.path.vertices) } });
 
 export function layersOf(blank: Blank, sizes: AreaSizes): Layers {
   const walked = walkBoundary(blank);
@@ -36,9 +39,9 @@ export function layersOf(blank: Blank, sizes: AreaSizes): Layers {
       layers[f.kind].push({ id: `feature:${panel.name}:${i + 1}`, role: "feature", path: applyToPath(panel.flat, f.path), panels: [panel.name] });
     });
   }
-  layers.glue = glueAreas(blank, sizes.glueMargin);
-  layers.bleed = bleedAreas(blank, walked, layers.glue, sizes.bleed);
-  layers.safe = safeAreas(blank, sizes.safe);
+  layers.glue = glueAreas(blank, sizes.glueMargin).map(tidy);
+  layers.bleed = bleedAreas(blank, walked, layers.glue, sizes.bleed).map(tidy);
+  layers.safe = safeAreas(blank, sizes.safe).map(tidy);
   return layers;
 }
 

@@ -109,7 +109,7 @@ function sharedLines(edges: readonly HalfEdge[]): SharedLine[] {
 }
 
 /** Leaves out points that repeat and points in the middle of a straight run: one line, one stroke. */
-function tidied(vertices: readonly Vertex[]): Vertex[] {
+export function tidied(vertices: readonly Vertex[]): Vertex[] {
   const apart = vertices.filter((v, i) => {
     const n = vertices[(i + 1) % vertices.length]!;
     return Math.hypot(n.x - v.x, n.y - v.y) > SHORTEST_LINE;
